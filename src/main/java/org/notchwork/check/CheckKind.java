@@ -1,0 +1,49 @@
+package org.notchwork.check;
+
+import java.util.Locale;
+
+/** The kinds of cross-check, each with what it compares and where the expectation comes from. */
+public enum CheckKind {
+    /** Every fibre of every instance has exactly two elements, and they differ by the hidden period. */
+    PROMISE("the promise, on the whole domain of every instance", "definition of the problem", true),
+    /** Exhaustive search finds the hidden answer, and every answer given equals it. */
+    EXHAUSTIVE_ANSWER("every answer against exhaustive search", "exhaustive search, written apart", true),
+    /** A deterministic strategy run on all secrets has the mean and the worst case of its closed form. */
+    ALL_SECRETS("mean and worst case over all secrets", "closed form of the law", true),
+    /** The engines give one and the same outcome distribution: uniform on the words orthogonal to the period. */
+    ENGINES("outcome distributions of the engines, word by word", "Simon 1997, section 3.1", true),
+    /** The query count of every trial of a deterministic strategy equals its closed form. */
+    CLOSED_FORM("query count of every trial against its closed form", "closed form of the law", false),
+    /** The observed mean lies within five standard errors of the exact expectation. */
+    THEORY_MEAN("observed mean against the exact expectation", "the law of the strategy", false);
+
+    private final String statement;
+    private final String source;
+    private final boolean exhaustive;
+
+    CheckKind(String statement, String source, boolean exhaustive) {
+        this.statement = statement;
+        this.source = source;
+        this.exhaustive = exhaustive;
+    }
+
+    /** Returns the word in files, for example {@code all-secrets}. */
+    public String word() {
+        return name().toLowerCase(Locale.ROOT).replace('_', '-');
+    }
+
+    /** Returns what is compared. */
+    public String statement() {
+        return statement;
+    }
+
+    /** Returns where the expectation comes from. */
+    public String source() {
+        return source;
+    }
+
+    /** Returns whether the check needs the instances again; if not, the trial lines are enough. */
+    public boolean needsInstances() {
+        return exhaustive;
+    }
+}

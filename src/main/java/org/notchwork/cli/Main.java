@@ -1,0 +1,16 @@
+package org.notchwork.cli;
+
+/** The program's entry: maps a verb to the class that does it. */
+public final class Main {
+
+    private Main() {}
+
+    /**
+     * Runs the program.
+     *
+     * @param args the verb and its arguments
+     */
+    public static void main(String[] args) {
+        throw new IllegalStateException("no verb yet: " + args.length);
+    }
+}

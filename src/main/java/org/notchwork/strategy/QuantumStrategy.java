@@ -1,0 +1,18 @@
+package org.notchwork.strategy;
+
+import org.notchwork.engine.Simulation;
+import org.notchwork.problem.Oracle;
+import org.notchwork.seed.RandomStream;
+
+/** A strategy that runs circuits around the function. */
+public non-sealed interface QuantumStrategy extends Strategy {
+
+    /**
+     * Tries to answer.
+     *
+     * @param simulation the engine, opened on the function; it counts on the oracle's meter
+     * @param oracle the function, for classical evaluations; {@link Oracle#remaining} covers both
+     * @param stream the strategy's own randomness, measurements included
+     */
+    Attempt attempt(Simulation simulation, Oracle oracle, RandomStream stream);
+}

@@ -1,0 +1,23 @@
+package org.notchwork.strategy;
+
+import java.util.Optional;
+import org.notchwork.problem.Problem;
+
+/** A way to answer a question. Immutable and without state. */
+public sealed interface Strategy permits ClassicalStrategy, QuantumStrategy {
+
+    /** Returns the name, as a study file gives it. */
+    String name();
+
+    /** Returns in one sentence how the strategy works, for people. */
+    String description();
+
+    /** Returns why the strategy does not answer a problem's question at a width; empty if it does. */
+    Optional<String> refusal(Problem problem, int width);
+
+    /** Returns whether the query count depends on the hidden answer alone, not on chance or labels. */
+    boolean deterministic();
+
+    /** Returns about how many bytes an attempt at a width takes at most, within a query limit. */
+    long memoryBytes(int width, long queryLimit);
+}

@@ -1,0 +1,18 @@
+package org.notchwork.trial;
+
+import java.util.Locale;
+
+/** What came of a trial. */
+public enum Outcome {
+    /** The answer was right. */
+    SOLVED,
+    /** The answer was wrong. */
+    WRONG,
+    /** The query limit was reached first. */
+    CENSORED;
+
+    /** Returns the word in files. */
+    public String word() {
+        return name().toLowerCase(Locale.ROOT);
+    }
+}
