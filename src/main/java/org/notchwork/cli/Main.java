@@ -11,6 +11,7 @@ public final class Main {
      * @param args the verb and its arguments
      */
     public static void main(String[] args) {
-        throw new IllegalStateException("no verb yet: " + args.length);
+        System.err.println("notchwork: no verb given");
+        System.exit(2);
     }
 }
