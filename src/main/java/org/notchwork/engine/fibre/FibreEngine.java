@@ -1,0 +1,139 @@
+package org.notchwork.engine.fibre;
+
+import java.util.Optional;
+import org.notchwork.bits.WalshHadamard;
+import org.notchwork.engine.BlindEngine;
+import org.notchwork.engine.Measurement;
+import org.notchwork.engine.Outcomes;
+import org.notchwork.engine.Reach;
+import org.notchwork.engine.Simulation;
+import org.notchwork.problem.Problem;
+import org.notchwork.problem.Unitary;
+import org.notchwork.seed.RandomStream;
+
+/**
+ * Measures the value register first. Its outcome v = f(x₀), x₀ uniform, leaves the input register in the uniform
+ * superposition of the fibre F = f⁻¹(v); Hadamards then give y with probability |Σ_{x∈F} (−1)^(x·y)|² / (2^n |F|).
+ */
+public final class FibreEngine implements BlindEngine {
+
+    /** The name in study files. */
+    public static final String NAME = "fibre";
+
+    private static final int WIDTH = 26;
+
+    @Override
+    public String name() {
+        return NAME;
+    }
+
+    @Override
+    public String description() {
+        return "the value register is measured first; the fibre that is left is found by evaluating the function"
+                + " everywhere and then transformed";
+    }
+
+    @Override
+    public Optional<String> refusal(Problem problem, int width) {
+        return width <= WIDTH
+                ? Optional.empty()
+                : Optional.of("fibre evaluates all 2^n points and reaches width " + WIDTH + ", not " + width
+                        + "; engine annihilator reaches width 63 but is sighted");
+    }
+
+    @Override
+    public long memoryBytes(int width) {
+        return 8L << width;
+    }
+
+    @Override
+    public Simulation open(Unitary unitary) {
+        return new Opened(unitary);
+    }
+
+    private static final class Opened implements Simulation {
+
+        private final Unitary unitary;
+        private Optional<Fibres> fibres = Optional.empty();
+
+        Opened(Unitary unitary) {
+            this.unitary = unitary;
+        }
+
+        @Override
+        public long fourierSample(RandomStream stream) {
+            unitary.use();
+            if (fibres.isEmpty()) {
+                fibres = Optional.of(new Fibres(unitary));
+            }
+            int[] fibre = fibres.get().of(unitary.image(stream.bits(unitary.width())));
+            return isSmall(fibre.length, unitary.width())
+                    ? byRejection(fibre, stream)
+                    : new Measurement(squares(fibre)).draw(stream);
+        }
+
+        @Override
+        public Outcomes outcomes() {
+            Reach.requireListable(unitary.width());
+            Fibres all = new Fibres(unitary);
+            long[] weights = new long[all.size()];
+            for (int start = 0; start < all.size(); ) {
+                int[] fibre = all.startingAt(start);
+                addSquares(fibre, weights);
+                start += fibre.length;
+            }
+            return new Outcomes(weights);
+        }
+
+        /** Rejection takes about |F|² steps, a transform n · 2^n: the cheaper one is used. */
+        private static boolean isSmall(int size, int width) {
+            return (long) size * size <= (long) width << width;
+        }
+
+        /** Draws y uniformly and keeps it with probability amplitude² / |F|²; one round in |F| is kept. */
+        private long byRejection(int[] fibre, RandomStream stream) {
+            long all = (long) fibre.length * fibre.length;
+            while (true) {
+                long y = stream.bits(unitary.width());
+                long amplitude = amplitude(fibre, y);
+                if (stream.below(all) < amplitude * amplitude) {
+                    return y;
+                }
+            }
+        }
+
+        private long[] squares(int[] fibre) {
+            long[] amplitudes = new long[1 << unitary.width()];
+            for (int x : fibre) {
+                amplitudes[x] = 1;
+            }
+            WalshHadamard.transform(amplitudes);
+            for (int y = 0; y < amplitudes.length; y++) {
+                amplitudes[y] *= amplitudes[y];
+            }
+            return amplitudes;
+        }
+
+        private void addSquares(int[] fibre, long[] weights) {
+            if (fibre.length > unitary.width()) {
+                long[] squares = squares(fibre);
+                for (int y = 0; y < weights.length; y++) {
+                    weights[y] += squares[y];
+                }
+                return;
+            }
+            for (int y = 0; y < weights.length; y++) {
+                long amplitude = amplitude(fibre, y);
+                weights[y] += amplitude * amplitude;
+            }
+        }
+
+        private static long amplitude(int[] fibre, long y) {
+            long amplitude = 0;
+            for (int x : fibre) {
+                amplitude += 1L - 2L * (Long.bitCount(x & y) & 1);
+            }
+            return amplitude;
+        }
+    }
+}

@@ -1,0 +1,74 @@
+package org.notchwork.law;
+
+import java.math.BigDecimal;
+import java.math.BigInteger;
+import java.util.Optional;
+import java.util.OptionalLong;
+import org.notchwork.exact.Decimals;
+
+/**
+ * Rounds until n − 1 independent words are held, each word uniform on a space of dimension n − 1. The wait for the
+ * i-th from the last is geometric with success 1 − 2^−i.
+ */
+public final class FourierRoundsLaw implements QueryLaw {
+
+    @Override
+    public Prediction mean(int width) {
+        BigInteger top = BigInteger.ZERO;
+        BigInteger bottom = BigInteger.ONE;
+        for (int i = 1; i < width; i++) {
+            BigInteger p = BigInteger.ONE.shiftLeft(i);
+            BigInteger q = p.subtract(BigInteger.ONE);
+            top = top.multiply(q).add(p.multiply(bottom));
+            bottom = bottom.multiply(q);
+        }
+        return Prediction.ratio(top, bottom);
+    }
+
+    @Override
+    public Optional<BigDecimal> variance(int width) {
+        BigDecimal sum = BigDecimal.ZERO;
+        for (int i = 1; i < width; i++) {
+            BigInteger p = BigInteger.ONE.shiftLeft(i);
+            BigInteger q = p.subtract(BigInteger.ONE);
+            sum = sum.add(Decimals.quotient(p, q.multiply(q)), Decimals.CONTEXT);
+        }
+        return Optional.of(sum);
+    }
+
+    @Override
+    public OptionalLong worst(int width) {
+        return OptionalLong.empty();
+    }
+
+    @Override
+    public OptionalLong queries(int width, long period) {
+        return OptionalLong.empty();
+    }
+
+    /**
+     * Returns P(R ≤ m) = ∏_{i=0}^{n−2} (1 − 2^(i−m)), the probability that m words uniform on a space of dimension
+     * n − 1 span it; 0 for m &lt; n − 1.
+     */
+    public Prediction within(int width, int rounds) {
+        if (rounds < width - 1) {
+            return Prediction.ratio(BigInteger.ZERO, BigInteger.ONE);
+        }
+        BigInteger all = BigInteger.ONE.shiftLeft(rounds);
+        BigInteger top = BigInteger.ONE;
+        for (int i = 0; i < width - 1; i++) {
+            top = top.multiply(all.subtract(BigInteger.ONE.shiftLeft(i)));
+        }
+        return Prediction.ratio(top, BigInteger.ONE.shiftLeft(Math.multiplyExact(rounds, width - 1)));
+    }
+
+    @Override
+    public String formula() {
+        return "sum_{i=1}^{n-1} 1 / (1 - 2^-i)";
+    }
+
+    @Override
+    public String source() {
+        return "Simon, SIAM J. Comput. 26 (1997) for the words; the waits are geometric, derived";
+    }
+}

@@ -1,0 +1,2 @@
+/** Strategies that evaluate the function at one point after another. */
+package org.notchwork.strategy.classical;
