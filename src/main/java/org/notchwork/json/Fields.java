@@ -229,6 +229,11 @@ public final class Fields {
             return at;
         }
 
+        /** Notes a fault of the item. */
+        public void fault(String wrong, String mend) {
+            faults.add(new Fault(at, wrong, mend));
+        }
+
         /** Returns the item as an object. */
         public Fields object() {
             return of(value, at, faults);

@@ -1,6 +1,7 @@
 package org.notchwork.study;
 
 import java.util.List;
+import java.util.Optional;
 import org.notchwork.problem.Problem;
 
 /**
@@ -25,5 +26,17 @@ public record Experiment(
     public Experiment {
         widths = List.copyOf(widths);
         strategies = List.copyOf(strategies);
+    }
+
+    /** Returns the cells: by width, then strategy. */
+    public List<Cell> cells() {
+        return widths.stream()
+                .flatMap(w -> strategies.stream().map(s -> new Cell(id, w, s.label())))
+                .toList();
+    }
+
+    /** Returns the choice of a label. */
+    public Optional<StrategyChoice> choice(String label) {
+        return strategies.stream().filter(s -> s.label().equals(label)).findFirst();
     }
 }

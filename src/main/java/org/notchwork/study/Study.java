@@ -1,6 +1,7 @@
 package org.notchwork.study;
 
 import java.util.List;
+import java.util.Optional;
 import org.notchwork.seed.Seed;
 
 /**
@@ -29,9 +30,11 @@ public record Study(
 
     /** Returns all cells: by experiment, then width, then strategy, in the order of the study. */
     public List<Cell> cells() {
-        return experiments.stream()
-                .flatMap(e -> e.widths().stream()
-                        .flatMap(w -> e.strategies().stream().map(s -> new Cell(e.id(), w, s.label()))))
-                .toList();
+        return experiments.stream().flatMap(e -> e.cells().stream()).toList();
+    }
+
+    /** Returns the experiment of an id. */
+    public Optional<Experiment> experiment(String id) {
+        return experiments.stream().filter(e -> e.id().equals(id)).findFirst();
     }
 }

@@ -1,0 +1,103 @@
+package org.notchwork.study;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.regex.Pattern;
+import org.notchwork.catalogue.Problems;
+import org.notchwork.json.Fields;
+import org.notchwork.json.JsonInteger;
+import org.notchwork.json.Spelling;
+import org.notchwork.problem.Problem;
+
+/** Reads one experiment. */
+final class ExperimentReader {
+
+    /** What the id of an experiment or of a claim looks like; it becomes part of a file name. */
+    static final Pattern ID = Pattern.compile("[a-z0-9](?:[a-z0-9-]{0,38}[a-z0-9])?");
+
+    /** What to say when an id does not look so. */
+    static final String ID_MEND = "1 to 40 lower-case letters, digits and inner hyphens are wanted";
+
+    private static final int MOST_WIDTHS = 40;
+    private static final int MOST_STRATEGIES = 12;
+    private static final int MOST_TRIALS = 1_000_000;
+    private static final int ANY_WIDTH = 4096;
+
+    private ExperimentReader() {}
+
+    /** Returns the experiment; empty if its problem cannot be known. To be used only if no fault was noted. */
+    static Optional<Experiment> read(Fields fields) {
+        String id = fields.text("id", ID, ID_MEND);
+        Optional<Problem> problem = problem(fields.object("problem"));
+        List<Integer> widths = widths(fields, problem);
+        List<StrategyChoice> strategies = strategies(fields, problem, widths);
+        int trials = (int) fields.integer("trials", 1, MOST_TRIALS);
+        long limit = fields.integer("query-limit", 1, JsonInteger.MAX);
+        fields.end();
+        return problem.map(p -> new Experiment(id, p, widths, strategies, trials, limit));
+    }
+
+    private static Optional<Problem> problem(Fields settings) {
+        if (!settings.has("kind")) {
+            settings.fault(
+                    "kind", "this member is missing", "one of " + String.join(", ", Problems.kinds()) + " is wanted");
+            return Optional.empty();
+        }
+        String kind = settings.text("kind", 1, 60);
+        return Problems.family(kind)
+                .map(family -> {
+                    Problem configured = family.configure(settings);
+                    settings.end();
+                    return configured;
+                })
+                .or(() -> {
+                    if (!kind.isEmpty()) {
+                        settings.fault(
+                                "kind", "no problem " + Fields.quoted(kind), Spelling.mend(kind, Problems.kinds()));
+                    }
+                    return Optional.empty();
+                });
+    }
+
+    private static List<Integer> widths(Fields fields, Optional<Problem> problem) {
+        List<Integer> widths = new ArrayList<>();
+        int least = problem.map(Problem::leastWidth).orElse(1);
+        int greatest = problem.map(Problem::greatestWidth).orElse(ANY_WIDTH);
+        for (Fields.Item item : fields.items("widths", 1, MOST_WIDTHS)) {
+            if (!(item.value() instanceof JsonInteger number) || number.value() < least || number.value() > greatest) {
+                String wrong = item.value() instanceof JsonInteger number
+                        ? "width " + number.value()
+                        : "this is " + item.value().kind();
+                String reach = problem.map(
+                                p -> p.settings().member("instances").isPresent() ? " for these instances" : "")
+                        .orElse("");
+                item.fault(wrong, "a width from " + least + " to " + greatest + " is wanted" + reach);
+                continue;
+            }
+            int width = (int) number.value();
+            if (!widths.isEmpty() && width <= widths.get(widths.size() - 1)) {
+                item.fault(
+                        "width " + width + " after " + widths.get(widths.size() - 1),
+                        "different widths in ascending order are wanted");
+                continue;
+            }
+            widths.add(width);
+        }
+        return widths;
+    }
+
+    private static List<StrategyChoice> strategies(Fields fields, Optional<Problem> problem, List<Integer> widths) {
+        List<StrategyChoice> choices = new ArrayList<>();
+        StrategyReader reader = new StrategyReader(problem, widths);
+        for (Fields.Item item : fields.items("strategies", 1, MOST_STRATEGIES)) {
+            reader.read(item).ifPresent(choice -> {
+                if (choices.stream().anyMatch(c -> c.label().equals(choice.label()))) {
+                    item.fault("a second " + choice.label(), "strategies of an experiment must differ");
+                }
+                choices.add(choice);
+            });
+        }
+        return choices;
+    }
+}

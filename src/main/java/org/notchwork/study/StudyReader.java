@@ -1,0 +1,100 @@
+package org.notchwork.study;
+
+import java.util.ArrayList;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Optional;
+import java.util.Set;
+import java.util.regex.Pattern;
+import org.notchwork.json.Fault;
+import org.notchwork.json.Fields;
+import org.notchwork.json.JsonFault;
+import org.notchwork.json.JsonLimits;
+import org.notchwork.json.JsonReader;
+import org.notchwork.json.JsonValue;
+import org.notchwork.seed.Seed;
+
+/**
+ * Reads a study file strictly: whatever is unknown, repeated, out of range or impossible is a fault, and all faults of
+ * a file are found in one pass.
+ */
+public final class StudyReader {
+
+    /** The format and version that this reader knows. */
+    public static final String FORMAT = "notchwork-study/1";
+
+    /** The largest width that can be checked exhaustively. */
+    public static final int GREATEST_CROSS_CHECK = 12;
+
+    private static final int USUAL_CROSS_CHECK = 10;
+    private static final int LONGEST_TITLE = 200;
+    private static final int LONGEST_TEXT = 2000;
+    private static final int MOST_EXPERIMENTS = 8;
+    private static final int MOST_CLAIMS = 100;
+    private static final Pattern THIS_FORMAT = Pattern.compile(Pattern.quote(FORMAT));
+
+    private StudyReader() {}
+
+    /** Reads a study from the bytes of its file. */
+    public static StudyReading read(byte[] file) {
+        try {
+            return read(new JsonReader(JsonLimits.FILE).read(file));
+        } catch (JsonFault e) {
+            return new StudyReading(
+                    Optional.empty(), List.of(new Fault(e.place(), e.getMessage(), "a JSON document is wanted")));
+        }
+    }
+
+    /** Reads a study from a value that was read strictly already. */
+    public static StudyReading read(JsonValue document) {
+        List<Fault> faults = new ArrayList<>();
+        Fields fields = Fields.of(document, "", faults);
+        fields.text("format", THIS_FORMAT, "\"" + FORMAT + "\" is wanted; another version needs another program");
+        String title = fields.text("title", 1, LONGEST_TITLE);
+        String question = fields.text("question", 1, LONGEST_TEXT);
+        String seed = fields.text("seed", Seed.FORM, Seed.MEND);
+        int crossCheck = (int) fields.optionalInteger("cross-check-width", 0, GREATEST_CROSS_CHECK)
+                .orElse(USUAL_CROSS_CHECK);
+        List<Experiment> experiments = experiments(fields);
+        boolean sound = faults.isEmpty();
+        List<Claim> claims = claims(fields, sound ? Optional.of(experiments) : Optional.empty());
+        fields.end();
+        return faults.isEmpty()
+                ? new StudyReading(
+                        Optional.of(new Study(title, question, new Seed(seed), experiments, crossCheck, claims)),
+                        List.of())
+                : new StudyReading(Optional.empty(), faults);
+    }
+
+    private static List<Experiment> experiments(Fields fields) {
+        List<Experiment> experiments = new ArrayList<>();
+        Set<String> ids = new HashSet<>();
+        for (Fields.Item item : fields.items("experiments", 1, MOST_EXPERIMENTS)) {
+            Fields members = item.object();
+            ExperimentReader.read(members).ifPresent(experiment -> {
+                if (!experiment.id().isEmpty() && !ids.add(experiment.id())) {
+                    members.fault("id", "a second experiment " + Fields.quoted(experiment.id()), "ids must differ");
+                }
+                experiments.add(experiment);
+            });
+        }
+        return experiments;
+    }
+
+    /** Claims name cells, so they are matched with the experiments only if those are without fault. */
+    private static List<Claim> claims(Fields fields, Optional<List<Experiment>> experiments) {
+        List<Claim> claims = new ArrayList<>();
+        Set<String> ids = new HashSet<>();
+        ClaimReader reader = new ClaimReader(experiments);
+        for (Fields.Item item : fields.optionalItems("claims", 0, MOST_CLAIMS).orElse(List.of())) {
+            Fields members = item.object();
+            reader.read(members).ifPresent(claim -> {
+                if (!claim.id().isEmpty() && !ids.add(claim.id())) {
+                    members.fault("id", "a second claim " + Fields.quoted(claim.id()), "ids must differ");
+                }
+                claims.add(claim);
+            });
+        }
+        return claims;
+    }
+}
