@@ -1,0 +1,109 @@
+package org.notchwork.check;
+
+import java.util.List;
+import java.util.Optional;
+import org.notchwork.bits.Word;
+import org.notchwork.problem.Answer;
+import org.notchwork.problem.BitFunction;
+import org.notchwork.problem.Certificate;
+import org.notchwork.problem.Pair;
+
+/**
+ * Checks certificates against the function, sharing nothing with the strategies that made them: two evaluations for a
+ * pair; inner products, rank and two evaluations for equations.
+ */
+public final class CertificateCheck {
+
+    private CertificateCheck() {}
+
+    /**
+     * What is wrong with a certificate.
+     *
+     * @param member which part, as an RFC 6901 pointer below the certificate
+     * @param written what stands there
+     * @param right what would be right
+     */
+    public record Wrong(String member, String written, String right) {}
+
+    /** Returns the first thing wrong with a certificate; empty if it proves the answer. */
+    public static Optional<Wrong> check(BitFunction function, Answer answer, Certificate certificate) {
+        if (!(answer instanceof Answer.Period period)) {
+            return Optional.of(new Wrong("", answer.toString(), "a period"));
+        }
+        if (certificate instanceof Certificate.Collision collision) {
+            return pair(function, period.s(), collision.pair(), "/collision");
+        }
+        Certificate.Equations equations = (Certificate.Equations) certificate;
+        return equations(period.s(), equations.words())
+                .or(() -> startsAtZero(equations.confirmation()))
+                .or(() -> pair(function, period.s(), equations.confirmation(), "/equations/confirmation"));
+    }
+
+    private static Optional<Wrong> pair(BitFunction function, Word period, Pair pair, String at) {
+        String atX =
+                Word.of(function.valueWidth(), function.at(pair.x().bits())).hex();
+        String atY =
+                Word.of(function.valueWidth(), function.at(pair.y().bits())).hex();
+        if (!pair.fx().hex().equals(atX)) {
+            return Optional.of(new Wrong(at + "/fx", pair.fx().hex(), atX));
+        }
+        if (!pair.fy().hex().equals(atY)) {
+            return Optional.of(new Wrong(at + "/fy", pair.fy().hex(), atY));
+        }
+        String sum = pair.x().xor(period).hex();
+        if (!pair.y().hex().equals(sum)) {
+            return Optional.of(new Wrong(at + "/y", pair.y().hex(), sum));
+        }
+        return pair.collides() ? Optional.empty() : Optional.of(new Wrong(at + "/fy", atY, atX));
+    }
+
+    private static Optional<Wrong> startsAtZero(Pair confirmation) {
+        return confirmation.x().isZero()
+                ? Optional.empty()
+                : Optional.of(new Wrong(
+                        "/equations/confirmation/x",
+                        confirmation.x().hex(),
+                        Word.of(confirmation.x().width(), 0).hex()));
+    }
+
+    private static Optional<Wrong> equations(Word period, List<Word> words) {
+        for (int i = 0; i < words.size(); i++) {
+            if (words.get(i).dot(period) != 0) {
+                return Optional.of(
+                        new Wrong("/equations/words/" + i, words.get(i).hex(), "a word orthogonal to " + period.hex()));
+            }
+        }
+        int rank = rank(words);
+        int wanted = period.width() - 1;
+        if (words.size() != wanted || rank != wanted) {
+            return Optional.of(new Wrong(
+                    "/equations/words", words.size() + " words of rank " + rank, wanted + " independent words"));
+        }
+        return Optional.empty();
+    }
+
+    /** The rank by plain Gaussian elimination, column by column. */
+    private static int rank(List<Word> words) {
+        long[] rows = words.stream().mapToLong(Word::bits).toArray();
+        int rank = 0;
+        for (int column = 62; column >= 0 && rank < rows.length; column--) {
+            int pivot = rank;
+            while (pivot < rows.length && (rows[pivot] >>> column & 1) == 0) {
+                pivot++;
+            }
+            if (pivot == rows.length) {
+                continue;
+            }
+            long row = rows[pivot];
+            rows[pivot] = rows[rank];
+            rows[rank] = row;
+            for (int i = rank + 1; i < rows.length; i++) {
+                if ((rows[i] >>> column & 1) != 0) {
+                    rows[i] ^= row;
+                }
+            }
+            rank++;
+        }
+        return rank;
+    }
+}

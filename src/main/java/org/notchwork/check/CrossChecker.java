@@ -1,0 +1,139 @@
+package org.notchwork.check;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import org.notchwork.catalogue.Laws;
+import org.notchwork.figure.CellFigures;
+import org.notchwork.figure.Summary;
+import org.notchwork.law.QueryLaw;
+import org.notchwork.seed.SeedTree;
+import org.notchwork.strategy.ClassicalStrategy;
+import org.notchwork.study.Cell;
+import org.notchwork.study.Experiment;
+import org.notchwork.study.StrategyChoice;
+import org.notchwork.study.Study;
+
+/** Makes the list of cross-checks of a study from what was gathered: by experiment, width and kind. */
+public final class CrossChecker {
+
+    private final Study study;
+
+    /** Creates the checker of a study. */
+    public CrossChecker(Study study) {
+        this.study = study;
+    }
+
+    /** Returns whether the instances of a width are examined exhaustively. */
+    public static boolean isExhaustive(Study study, int width) {
+        return width <= study.crossCheckWidth();
+    }
+
+    /** Returns the checks that need nothing but the records of the trials. */
+    public List<CrossCheck> fromLines(LineChecks lines, Summary summary) {
+        List<CrossCheck> checks = new ArrayList<>();
+        Map<Cell, CellFigures> figures = byCell(summary);
+        for (Experiment experiment : study.experiments()) {
+            for (int width : experiment.widths()) {
+                fromLines(experiment, width, lines, figures, checks);
+            }
+        }
+        return checks;
+    }
+
+    /**
+     * Returns all checks.
+     *
+     * @param examined what exhaustive examination found, by {@code EXPERIMENT/WIDTH}
+     * @param lines what the records gave
+     * @param summary the figures
+     */
+    public List<CrossCheck> all(Map<String, InstanceTally> examined, LineChecks lines, Summary summary) {
+        List<CrossCheck> checks = new ArrayList<>();
+        Map<Cell, CellFigures> figures = byCell(summary);
+        for (Experiment experiment : study.experiments()) {
+            for (int width : experiment.widths()) {
+                if (isExhaustive(study, width)) {
+                    InstanceTally tally = examined.getOrDefault(subject(experiment.id(), width), InstanceTally.NONE);
+                    exhaustive(experiment, width, tally, checks);
+                }
+                fromLines(experiment, width, lines, figures, checks);
+            }
+        }
+        return checks;
+    }
+
+    /** Returns how a check of a whole width is called: {@code EXPERIMENT/WIDTH}. */
+    public static String subject(String experiment, int width) {
+        return experiment + "/" + width;
+    }
+
+    private void exhaustive(Experiment experiment, int width, InstanceTally tally, List<CrossCheck> checks) {
+        String subject = subject(experiment.id(), width);
+        checks.add(check(
+                CheckKind.PROMISE,
+                subject,
+                tally.promise(),
+                "in every instance every value has two inputs, and they differ by the hidden period"));
+        checks.add(check(
+                CheckKind.EXHAUSTIVE_ANSWER,
+                subject,
+                tally.answers(),
+                "the hidden answer of every instance and every answer given equal what search finds"));
+        AllSecrets allSecrets = new AllSecrets(new SeedTree(study.seed()));
+        for (StrategyChoice choice : experiment.strategies()) {
+            Optional<QueryLaw> law = law(experiment, choice);
+            if (choice.strategy() instanceof ClassicalStrategy classical
+                    && classical.deterministic()
+                    && law.isPresent()) {
+                String cell = new Cell(experiment.id(), width, choice.label()).id();
+                checks.add(allSecrets.check(experiment, width, cell, classical, law.get()));
+            }
+        }
+        if (experiment.strategies().stream().anyMatch(s -> s.engine().isPresent())) {
+            checks.add(check(
+                    CheckKind.ENGINES,
+                    subject,
+                    tally.engines(),
+                    "every engine gives 2^(1-n) to each word orthogonal to the period and 0 to the others, exactly"));
+        }
+    }
+
+    private static void fromLines(
+            Experiment experiment,
+            int width,
+            LineChecks lines,
+            Map<Cell, CellFigures> figures,
+            List<CrossCheck> checks) {
+        for (StrategyChoice choice : experiment.strategies()) {
+            lines.check(new Cell(experiment.id(), width, choice.label())).ifPresent(checks::add);
+        }
+        for (StrategyChoice choice : experiment.strategies()) {
+            CellFigures cell = figures.get(new Cell(experiment.id(), width, choice.label()));
+            law(experiment, choice).ifPresent(law -> checks.add(TheoryMean.check(cell, law)));
+        }
+    }
+
+    private static CrossCheck check(CheckKind kind, String subject, Comparison comparison, String expected) {
+        return new CrossCheck(
+                kind,
+                subject,
+                comparison.compared(),
+                expected,
+                comparison.text(),
+                Optional.empty(),
+                comparison.outcome());
+    }
+
+    private static Optional<QueryLaw> law(Experiment experiment, StrategyChoice choice) {
+        return Laws.law(experiment.problem().kind(), choice.strategy().name());
+    }
+
+    private static Map<Cell, CellFigures> byCell(Summary summary) {
+        Map<Cell, CellFigures> figures = new LinkedHashMap<>();
+        summary.cells().forEach(c -> figures.put(c.cell(), c));
+        return figures;
+    }
+}

@@ -1,0 +1,83 @@
+package org.notchwork.figure;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import org.notchwork.study.Cell;
+import org.notchwork.study.Experiment;
+import org.notchwork.study.StrategyChoice;
+import org.notchwork.study.Study;
+import org.notchwork.trial.TrialGroup;
+import org.notchwork.trial.TrialRecord;
+
+/** Gathers trials as they pass and makes the figures of a study. */
+public final class SummaryBuilder {
+
+    private record Place(String experiment, int width) {}
+
+    private final Map<Place, List<CellTally>> cells = new LinkedHashMap<>();
+    private final Map<Place, List<PairTally>> pairs = new LinkedHashMap<>();
+
+    /** Starts with no trials. */
+    public SummaryBuilder(Study study) {
+        for (Experiment experiment : study.experiments()) {
+            for (int width : experiment.widths()) {
+                Place place = new Place(experiment.id(), width);
+                cells.put(place, tallies(experiment, width));
+                pairs.put(place, pairs(experiment, width));
+            }
+        }
+    }
+
+    /** Adds one instance faced by every strategy of its experiment. */
+    public void add(TrialGroup group) {
+        Place place = new Place(group.experiment(), group.width());
+        List<TrialRecord> records = group.records();
+        List<CellTally> tallies = cells.get(place);
+        for (int i = 0; i < records.size(); i++) {
+            tallies.get(i).add(records.get(i));
+        }
+        int next = 0;
+        List<PairTally> pairTallies = pairs.get(place);
+        for (int i = 0; i < records.size(); i++) {
+            for (int j = i + 1; j < records.size(); j++) {
+                pairTallies.get(next++).add(records.get(i), records.get(j));
+            }
+        }
+    }
+
+    /** Returns the figures of all trials added; every cell must have had one. */
+    public Summary summary() {
+        return new Summary(
+                cells.values().stream()
+                        .flatMap(List::stream)
+                        .map(CellTally::figures)
+                        .toList(),
+                pairs.values().stream()
+                        .flatMap(List::stream)
+                        .map(PairTally::figures)
+                        .toList());
+    }
+
+    private static List<CellTally> tallies(Experiment experiment, int width) {
+        List<CellTally> tallies = new ArrayList<>();
+        for (StrategyChoice choice : experiment.strategies()) {
+            tallies.add(new CellTally(new Cell(experiment.id(), width, choice.label()), choice));
+        }
+        return tallies;
+    }
+
+    private static List<PairTally> pairs(Experiment experiment, int width) {
+        List<Cell> line = experiment.strategies().stream()
+                .map(s -> new Cell(experiment.id(), width, s.label()))
+                .toList();
+        List<PairTally> tallies = new ArrayList<>();
+        for (int i = 0; i < line.size(); i++) {
+            for (int j = i + 1; j < line.size(); j++) {
+                tallies.add(new PairTally(line.get(i), line.get(j)));
+            }
+        }
+        return tallies;
+    }
+}
