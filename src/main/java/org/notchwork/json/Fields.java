@@ -112,6 +112,13 @@ public final class Fields {
         });
     }
 
+    /** Notes a fault unless a required member has exactly this value. */
+    public void require(String name, JsonValue value) {
+        required(name, value.kind()).filter(v -> !v.equals(value)).ifPresent(v -> {
+            faults.add(new Fault(pointer(name), shown(v), shown(value) + " is wanted"));
+        });
+    }
+
     /** Returns a required member that is an object. */
     public Fields object(String name) {
         return of(required(name, "an object").orElse(new JsonObject(Collections.emptyMap())), pointer(name), faults);
@@ -145,6 +152,11 @@ public final class Fields {
     public static String quoted(String text) {
         String shown = text.length() <= SHOWN ? text : text.substring(0, SHOWN) + "…";
         return CanonicalJson.text(new JsonText(shown));
+    }
+
+    private static String shown(JsonValue value) {
+        String text = CanonicalJson.text(value);
+        return text.length() <= SHOWN ? text : text.substring(0, SHOWN) + "…";
     }
 
     private Optional<JsonValue> optional(String name) {
