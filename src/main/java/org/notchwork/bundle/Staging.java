@@ -1,0 +1,151 @@
+package org.notchwork.bundle;
+
+import java.io.IOException;
+import java.nio.channels.FileChannel;
+import java.nio.channels.FileLock;
+import java.nio.channels.OverlappingFileLockException;
+import java.nio.file.FileVisitResult;
+import java.nio.file.Files;
+import java.nio.file.LinkOption;
+import java.nio.file.Path;
+import java.nio.file.SimpleFileVisitor;
+import java.nio.file.StandardCopyOption;
+import java.nio.file.StandardOpenOption;
+import java.nio.file.attribute.BasicFileAttributes;
+
+/**
+ * A hidden folder beside a final place, and the step that gives it the final name.
+ *
+ * <p>A lock file beside it, held for as long as the folder is being filled, keeps a second run away; the lock ends
+ * with the process, however that ends. What an earlier run left behind is removed when the next one begins.
+ */
+final class Staging implements AutoCloseable {
+
+    private final Path target;
+    private final boolean replace;
+    private final Path folder;
+    private final Path old;
+    private final Path lockFile;
+    private final FileChannel channel;
+    private boolean complete;
+
+    private Staging(Path target, boolean replace, Path lockFile, FileChannel channel) {
+        this.target = target;
+        this.replace = replace;
+        this.lockFile = lockFile;
+        this.channel = channel;
+        this.folder = hidden(target, "partial");
+        this.old = hidden(target, "replaced");
+    }
+
+    /** Begins to fill a folder for a target. */
+    static Staging begin(Path target, boolean replace) throws IOException {
+        Path place = target.toAbsolutePath().normalize();
+        if (place.getFileName() == null) {
+            throw new IOException(target + ": this is no place for a bundle; name a new folder");
+        }
+        requireFree(place, replace);
+        Files.createDirectories(place.getParent());
+        Path lockFile = hidden(place, "lock");
+        FileChannel channel = FileChannel.open(lockFile, StandardOpenOption.CREATE, StandardOpenOption.WRITE);
+        try {
+            FileLock lock = channel.tryLock();
+            if (lock == null) {
+                throw new IOException(target + ": another run is writing here; wait for it or name another folder");
+            }
+        } catch (OverlappingFileLockException e) {
+            channel.close();
+            throw new IOException(target + ": this run is writing here already", e);
+        } catch (IOException e) {
+            channel.close();
+            throw e;
+        }
+        Staging staging = new Staging(place, replace, lockFile, channel);
+        delete(staging.folder);
+        delete(staging.old);
+        Files.createDirectory(staging.folder);
+        return staging;
+    }
+
+    /** Returns the folder to fill. */
+    Path folder() {
+        return folder;
+    }
+
+    /** Gives the folder its final name; what stood there before is moved aside first and removed last. */
+    void complete() throws IOException {
+        requireFree(target, replace);
+        force(folder.resolve("data"));
+        force(folder);
+        if (Files.exists(target, LinkOption.NOFOLLOW_LINKS)) {
+            Files.move(target, old, StandardCopyOption.ATOMIC_MOVE);
+        }
+        Files.move(folder, target, StandardCopyOption.ATOMIC_MOVE);
+        force(target.getParent());
+        complete = true;
+        delete(old);
+    }
+
+    /** Removes the folder unless it is complete, and lets others write here. */
+    @Override
+    public void close() throws IOException {
+        try {
+            if (!complete) {
+                delete(folder);
+            }
+            Files.deleteIfExists(lockFile);
+        } finally {
+            channel.close();
+        }
+    }
+
+    /** Makes sure that a file or folder is on the disk, where the system can tell. */
+    static void force(Path path) throws IOException {
+        try (FileChannel file = FileChannel.open(path, StandardOpenOption.READ)) {
+            file.force(true);
+        } catch (IOException e) {
+            if (!Files.isDirectory(path)) {
+                throw e;
+            }
+            // Some systems cannot open a folder; its entries are then as safe as that system makes them.
+        }
+    }
+
+    private static void requireFree(Path target, boolean replace) throws IOException {
+        if (!Files.exists(target, LinkOption.NOFOLLOW_LINKS)) {
+            return;
+        }
+        if (!replace) {
+            throw new IOException(target + ": already there; name another folder or say --replace");
+        }
+        if (!Files.isRegularFile(target.resolve(Layout.BAGIT), LinkOption.NOFOLLOW_LINKS)) {
+            throw new IOException(target + ": not a bundle, so it is not replaced; name another folder");
+        }
+    }
+
+    private static Path hidden(Path target, String what) {
+        return target.resolveSibling("." + target.getFileName() + "." + what);
+    }
+
+    private static void delete(Path path) throws IOException {
+        if (!Files.exists(path, LinkOption.NOFOLLOW_LINKS)) {
+            return;
+        }
+        Files.walkFileTree(path, new SimpleFileVisitor<>() {
+            @Override
+            public FileVisitResult visitFile(Path file, BasicFileAttributes attributes) throws IOException {
+                Files.delete(file);
+                return FileVisitResult.CONTINUE;
+            }
+
+            @Override
+            public FileVisitResult postVisitDirectory(Path directory, IOException fault) throws IOException {
+                if (fault != null) {
+                    throw fault;
+                }
+                Files.delete(directory);
+                return FileVisitResult.CONTINUE;
+            }
+        });
+    }
+}
