@@ -143,7 +143,9 @@ class JsonReaderTest {
                         refusal.isEmpty()
                                 || refusal.get()
                                         .matches(
-                                                "(null is|a number with a fraction|a whole number beyond|-0|a second member).*"),
+                                                "(null is|a number with a fraction|a whole number beyond|-0|a second member).*")
+                                || (fields[0].startsWith("y_number")
+                                        && refusal.get().contains("number longer than")),
                         () -> fields[0] + ": " + refusal);
                 accepted += refusal.isEmpty() ? 1 : 0;
             }
