@@ -39,7 +39,7 @@ final class CertificateForm {
 
     private static Optional<Certificate> equations(Fields fields, int width) {
         List<Word> words = new ArrayList<>();
-        for (Fields.Item item : fields.items("words", width - 1, width - 1)) {
+        for (Fields.Item item : fields.items("words", 0, width)) {
             Optional<Word> word = item.value() instanceof JsonText text ? word(text.value(), width) : Optional.empty();
             word.ifPresentOrElse(words::add, () -> item.fault("not such a word", mend(width)));
         }

@@ -8,7 +8,6 @@ import org.notchwork.json.Fields;
 import org.notchwork.json.JsonArray;
 import org.notchwork.json.JsonInteger;
 import org.notchwork.json.JsonObject;
-import org.notchwork.json.JsonText;
 import org.notchwork.json.JsonValue;
 import org.notchwork.problem.Answer;
 import org.notchwork.problem.Certificate;
@@ -22,6 +21,9 @@ import org.notchwork.trial.TrialRecord;
 
 /** One line of a file of trials: its writer and its reader. */
 public final class TrialLine {
+
+    private static final int GREATEST_WIDTH = 63;
+    private static final int LONGEST_LABEL = 121;
 
     private TrialLine() {}
 
@@ -45,41 +47,48 @@ public final class TrialLine {
     }
 
     /**
-     * Reads the line of a trial that the study calls for at this place.
+     * A line as it was read.
+     *
+     * @param record the record
+     * @param engine the engine that the line names
+     * @param sight what the line says that the engine was told
+     */
+    public record Read(TrialRecord record, Optional<String> engine, Optional<String> sight) {}
+
+    /**
+     * Reads a line. Whether it is the line that the study calls for is for others to ask.
      *
      * @param value the line
-     * @param cell the cell that the line should be of
-     * @param trial the number that the trial should have
-     * @param choice the strategy of the cell
-     * @param faults where faults are noted; the record must not be used if there are any
-     * @return the record; empty if it could not even be put together
+     * @param experiment the id of the experiment whose file it stands in
+     * @param faults where faults are noted, one or more exactly if nothing is returned
      */
-    public static Optional<TrialRecord> read(
-            JsonValue value, Cell cell, long trial, StrategyChoice choice, List<Fault> faults) {
+    public static Optional<Read> read(JsonValue value, String experiment, List<Fault> faults) {
+        int before = faults.size();
         Fields fields = Fields.of(value, "", faults);
         Formats.require(fields, Formats.TRIAL);
-        fields.require("strategy", new JsonText(cell.label()));
-        fields.require("width", new JsonInteger(cell.width()));
-        fields.require("trial", new JsonInteger(trial));
-        choice.engine().ifPresent(e -> fields.require("engine", new JsonText(e.name())));
-        choice.sight().ifPresent(s -> fields.require("sight", new JsonText(s)));
+        int width = (int) fields.integer("width", 1, GREATEST_WIDTH);
+        Cell cell = new Cell(experiment, width, fields.text("strategy", 1, LONGEST_LABEL));
+        long trial = fields.integer("trial", 0, JsonInteger.MAX);
+        Optional<String> engine = fields.optionalText("engine", 1, LONGEST_LABEL);
+        Optional<String> sight = fields.optionalText("sight", 1, LONGEST_LABEL);
         Optional<Outcome> outcome = outcome(fields);
         Counts counts = counts(fields.object("calls"));
         Usage usage = new Usage(
                 fields.integer("equations", 0, JsonInteger.MAX), fields.integer("memory-words", 0, JsonInteger.MAX));
-        Optional<Answer> hidden = answer(fields.object("hidden"), cell.width());
+        Optional<Answer> hidden = answer(fields.object("hidden"), width);
         Optional<Answer> answer = Optional.empty();
         Optional<Certificate> certificate = Optional.empty();
         if (outcome.isPresent() && outcome.get() != Outcome.CENSORED) {
-            answer = answer(fields.object("answer"), cell.width());
-            certificate = CertificateForm.read(fields.object("certificate"), cell.width());
+            answer = answer(fields.object("answer"), width);
+            certificate = CertificateForm.read(fields.object("certificate"), width);
         }
         fields.end();
-        if (!faults.isEmpty() || outcome.isEmpty() || hidden.isEmpty()) {
+        if (faults.size() > before) {
             return Optional.empty();
         }
-        return Optional.of(
-                new TrialRecord(cell, trial, hidden.get(), outcome.get(), answer, certificate, counts, usage));
+        TrialRecord record = new TrialRecord(
+                cell, trial, hidden.orElseThrow(), outcome.orElseThrow(), answer, certificate, counts, usage);
+        return Optional.of(new Read(record, engine, sight));
     }
 
     private static Optional<Outcome> outcome(Fields fields) {

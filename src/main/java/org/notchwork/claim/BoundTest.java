@@ -1,6 +1,7 @@
 package org.notchwork.claim;
 
 import java.math.BigDecimal;
+import java.util.Optional;
 import org.notchwork.exact.Decimals;
 import org.notchwork.figure.Interval;
 import org.notchwork.study.Bound;
@@ -16,54 +17,50 @@ record BoundTest(ClaimVerdict verdict, String reason) {
     /** Compares an interval with a bound, believing only the ends that can be trusted. */
     static BoundTest of(Bound bound, Interval interval, Trust trust) {
         if (bound instanceof Bound.AtMost atMost) {
-            return of(
-                    interval,
-                    trust,
-                    isBelow(interval, atMost.high(), trust),
-                    isAbove(interval, atMost.high(), trust),
-                    "at most " + atMost.high().toPlainString());
+            return decide(
+                    interval, trust, belowOrAt(interval, atMost.high(), trust), above(interval, atMost.high(), trust));
         }
         if (bound instanceof Bound.AtLeast atLeast) {
-            boolean inside = trust != Trust.NEITHER_END && interval.low().compareTo(atLeast.low()) >= 0;
-            boolean outside = trust == Trust.BOTH_ENDS && interval.high().compareTo(atLeast.low()) < 0;
-            return of(
-                    interval,
-                    trust,
-                    inside,
-                    outside,
-                    "at least " + atLeast.low().toPlainString());
+            return decide(
+                    interval, trust, aboveOrAt(interval, atLeast.low(), trust), below(interval, atLeast.low(), trust));
         }
         Bound.Between between = (Bound.Between) bound;
-        boolean inside =
-                isBelow(interval, between.high(), trust) && interval.low().compareTo(between.low()) >= 0;
-        boolean outside = isAbove(interval, between.high(), trust)
-                || (trust == Trust.BOTH_ENDS && interval.high().compareTo(between.low()) < 0);
-        return of(
-                interval,
-                trust,
-                inside,
-                outside,
-                "between " + between.low().toPlainString() + " and "
-                        + between.high().toPlainString());
+        Optional<String> inside = belowOrAt(interval, between.high(), trust)
+                .flatMap(high -> aboveOrAt(interval, between.low(), trust).map(low -> low + " and " + high));
+        Optional<String> outside =
+                above(interval, between.high(), trust).or(() -> below(interval, between.low(), trust));
+        return decide(interval, trust, inside, outside);
     }
 
-    private static boolean isBelow(Interval interval, BigDecimal bound, Trust trust) {
-        return trust == Trust.BOTH_ENDS && interval.high().compareTo(bound) <= 0;
+    private static Optional<String> belowOrAt(Interval interval, BigDecimal bound, Trust trust) {
+        return when(trust == Trust.BOTH_ENDS && interval.high().compareTo(bound) <= 0, "at or below", bound);
     }
 
-    private static boolean isAbove(Interval interval, BigDecimal bound, Trust trust) {
-        return trust != Trust.NEITHER_END && interval.low().compareTo(bound) > 0;
+    private static Optional<String> below(Interval interval, BigDecimal bound, Trust trust) {
+        return when(trust == Trust.BOTH_ENDS && interval.high().compareTo(bound) < 0, "below", bound);
     }
 
-    private static BoundTest of(Interval interval, Trust trust, boolean inside, boolean outside, String claimed) {
+    private static Optional<String> aboveOrAt(Interval interval, BigDecimal bound, Trust trust) {
+        return when(trust != Trust.NEITHER_END && interval.low().compareTo(bound) >= 0, "at or above", bound);
+    }
+
+    private static Optional<String> above(Interval interval, BigDecimal bound, Trust trust) {
+        return when(trust != Trust.NEITHER_END && interval.low().compareTo(bound) > 0, "above", bound);
+    }
+
+    private static Optional<String> when(boolean holds, String side, BigDecimal bound) {
+        return holds ? Optional.of(side + " " + bound.toPlainString()) : Optional.empty();
+    }
+
+    private static BoundTest decide(Interval interval, Trust trust, Optional<String> inside, Optional<String> outside) {
         String where = "the 95 % interval " + Decimals.text(interval.low()) + " to " + Decimals.text(interval.high());
         String cut = trust == Trust.BOTH_ENDS ? "" : "; trials were censored, so not every end of it is a bound";
-        if (inside) {
-            return new BoundTest(ClaimVerdict.SUPPORTED, where + " lies wholly " + claimed + cut);
+        if (inside.isPresent()) {
+            return new BoundTest(ClaimVerdict.SUPPORTED, where + " lies wholly " + inside.get() + cut);
         }
-        if (outside) {
-            return new BoundTest(ClaimVerdict.REFUTED, where + " lies wholly outside \"" + claimed + "\"" + cut);
+        if (outside.isPresent()) {
+            return new BoundTest(ClaimVerdict.REFUTED, where + " lies wholly " + outside.get() + cut);
         }
-        return new BoundTest(ClaimVerdict.UNDECIDED, where + " does not decide \"" + claimed + "\"" + cut);
+        return new BoundTest(ClaimVerdict.UNDECIDED, where + " does not decide it" + cut);
     }
 }

@@ -1,6 +1,6 @@
 package org.notchwork.cli;
 
-/** The program's entry: maps a verb to the class that does it. */
+/** The program's entry: runs the verb that the command line names and ends with its exit code. */
 public final class Main {
 
     private Main() {}
@@ -11,7 +11,14 @@ public final class Main {
      * @param args the verb and its arguments
      */
     public static void main(String[] args) {
-        System.err.println("notchwork: no verb given");
-        System.exit(2);
+        Terminal terminal = Terminal.ofProcess();
+        Thread.setDefaultUncaughtExceptionHandler((thread, fault) -> {
+            terminal.err().println("notchwork: fault in " + thread.getName() + ": " + fault);
+            Runtime.getRuntime().halt(Exit.FAULT.code());
+        });
+        Interruption interruption = Interruption.watchingThisThread();
+        Exit exit = new CommandInterpreter(terminal).run(args);
+        interruption.finished();
+        System.exit(exit.code());
     }
 }

@@ -1,0 +1,27 @@
+package org.notchwork.run;
+
+import org.notchwork.bundle.MerkleTree;
+import org.notchwork.bundle.TrialLine;
+import org.notchwork.json.CanonicalJson;
+import org.notchwork.study.StrategyChoice;
+import org.notchwork.trial.TrialRecord;
+
+/** One trial line as bytes, with its leaf hash, both made in a worker. */
+final class Line {
+
+    private final byte[] bytes;
+    private final byte[] leafHash;
+
+    Line(TrialRecord record, StrategyChoice choice) {
+        this.bytes = CanonicalJson.bytes(TrialLine.write(record, choice));
+        this.leafHash = MerkleTree.leaf(bytes);
+    }
+
+    byte[] bytes() {
+        return bytes;
+    }
+
+    byte[] leafHash() {
+        return leafHash;
+    }
+}

@@ -1,0 +1,120 @@
+package org.notchwork.run;
+
+import java.io.IOException;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.function.Supplier;
+import org.notchwork.bundle.BundleWriter;
+import org.notchwork.bundle.Environment;
+import org.notchwork.bundle.Results;
+import org.notchwork.catalogue.Engines;
+import org.notchwork.check.CrossChecker;
+import org.notchwork.check.InstanceExaminer;
+import org.notchwork.check.InstanceTally;
+import org.notchwork.check.LineChecks;
+import org.notchwork.claim.Judge;
+import org.notchwork.figure.Summary;
+import org.notchwork.figure.SummaryBuilder;
+import org.notchwork.problem.Instance;
+import org.notchwork.report.Report;
+import org.notchwork.seed.SeedTree;
+import org.notchwork.study.Experiment;
+import org.notchwork.study.Study;
+import org.notchwork.trial.TrialGroup;
+import org.notchwork.trial.TrialPool;
+import org.notchwork.trial.TrialRange;
+import org.notchwork.trial.TrialRunner;
+
+/** Runs a study from its first trial to its sealed bundle. */
+public final class StudyRun {
+
+    private final Study study;
+    private final int threads;
+    private final TrialRunner runner;
+    private final InstanceExaminer examiner = new InstanceExaminer(Engines.all());
+
+    /**
+     * Creates a run.
+     *
+     * @param study the study
+     * @param threads how many worker threads; the results do not depend on it
+     */
+    public StudyRun(Study study, int threads) {
+        this.study = study;
+        this.threads = threads;
+        this.runner = new TrialRunner(new SeedTree(study.seed()));
+    }
+
+    /**
+     * What a run left.
+     *
+     * @param results the results
+     * @param seal the seal
+     */
+    public record Sealed(Results results, String seal) {}
+
+    /** Told of every instance that is done. */
+    @FunctionalInterface
+    public interface Listener {
+
+        /** One instance of an experiment and width is done. */
+        void done(Experiment experiment, int width);
+    }
+
+    /**
+     * Runs the study.
+     *
+     * @param target where the bundle will be
+     * @param replace whether a bundle that is there already may be replaced
+     * @param listener told of the progress, on the calling thread
+     * @param environment asked once, when the trials are done
+     * @throws IOException if the bundle cannot be written; nothing is then under its name
+     * @throws InterruptedException if the calling thread is interrupted; likewise
+     */
+    public Sealed seal(Path target, boolean replace, Listener listener, Supplier<Environment> environment)
+            throws IOException, InterruptedException {
+        try (BundleWriter writer = BundleWriter.begin(study, target, replace)) {
+            Results results = run(writer, listener);
+            Environment where = environment.get();
+            String seal = writer.finish(results, where, digest -> Report.pdf(results, digest, where));
+            return new Sealed(results, seal);
+        }
+    }
+
+    private Results run(BundleWriter writer, Listener listener) throws IOException, InterruptedException {
+        SummaryBuilder figures = new SummaryBuilder(study);
+        LineChecks lines = new LineChecks(study);
+        Map<String, InstanceTally> examined = new LinkedHashMap<>();
+        new TrialPool(threads).run(TrialRange.of(study), this::notch, (Notch notch) -> {
+            TrialGroup group = notch.group();
+            for (Line line : notch.lines()) {
+                writer.add(group.experiment(), line.bytes(), line.leafHash());
+            }
+            figures.add(group);
+            lines.add(group);
+            examined.merge(
+                    CrossChecker.subject(group.experiment(), group.width()), notch.examined(), InstanceTally::plus);
+            listener.done(study.experiment(group.experiment()).orElseThrow(), group.width());
+        });
+        Summary summary = figures.summary();
+        return new Results(
+                study, summary, new CrossChecker(study).all(examined, lines, summary), Judge.judge(study, summary));
+    }
+
+    private Notch notch(Experiment experiment, int width, long trial) {
+        TrialGroup group = runner.run(experiment, width, trial);
+        List<Line> lines = new ArrayList<>();
+        for (int i = 0; i < group.records().size(); i++) {
+            lines.add(new Line(group.records().get(i), experiment.strategies().get(i)));
+        }
+        InstanceTally examined = InstanceTally.NONE;
+        if (CrossChecker.isExhaustive(study, width)) {
+            Instance instance = runner.instance(experiment, width, trial);
+            examined = examiner.examine(experiment, instance, group);
+        }
+        return new Notch(group, lines, examined);
+    }
+}

@@ -1,0 +1,123 @@
+package org.notchwork.study;
+
+import java.math.BigDecimal;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.notchwork.catalogue.Engines;
+import org.notchwork.catalogue.Laws;
+import org.notchwork.engine.Engine;
+import org.notchwork.exact.Decimals;
+import org.notchwork.problem.Problem;
+
+/**
+ * What a study will probably cost, from the laws of its strategies and a plain model of the work.
+ *
+ * <p>The model counts elementary steps: one for a table entry or an evaluation, a few for a query that is remembered,
+ * 2n · 2^2n for a state vector, n · 2^n for sorting a domain into fibres. Its constants were measured once and are
+ * good to a factor of two or three between machines; a caller may measure its own machine and scale.
+ */
+public final class Forecast {
+
+    /** Nanoseconds of drawing one table entry. */
+    private static final double DRAW = 8;
+
+    /** Nanoseconds of a query that is looked up among those before it. */
+    private static final double QUERY = 35;
+
+    /** Nanoseconds of one gate on one amplitude, memory traffic included. */
+    private static final double AMPLITUDE = 0.7;
+
+    /** Nanoseconds of one comparison while sorting a domain. */
+    private static final double SORT = 4;
+
+    /** Nanoseconds of writing and hashing the line of a trial. */
+    private static final double LINE = 15_000;
+
+    private static final int ENGINES_WIDTH = 10;
+    private static final long FIRST_INSTANCES = 16;
+
+    private Forecast() {}
+
+    /** Returns the forecast of every cell, in the order of the study. */
+    public static List<CellForecast> of(Study study) {
+        List<CellForecast> forecasts = new ArrayList<>();
+        for (Experiment experiment : study.experiments()) {
+            for (int width : experiment.widths()) {
+                for (StrategyChoice choice : experiment.strategies()) {
+                    forecasts.add(cell(experiment, width, choice));
+                }
+            }
+        }
+        return forecasts;
+    }
+
+    /** Returns the expected time of exhaustively checking one instance of a width on one core, in nanoseconds. */
+    public static double examinationNanos(Study study, Experiment experiment, int width, long trial) {
+        if (width > study.crossCheckWidth()) {
+            return 0;
+        }
+        double nanos = drawing(experiment.problem(), width) + 10.0 * Math.scalb(1.0, width);
+        boolean quantum =
+                experiment.strategies().stream().anyMatch(s -> s.engine().isPresent());
+        if (quantum && (width <= ENGINES_WIDTH || trial < FIRST_INSTANCES)) {
+            for (Engine engine : Engines.all()) {
+                nanos += preparing(engine, width) + Math.scalb(2.0, 2 * width);
+            }
+        }
+        return nanos;
+    }
+
+    /** Returns the expected time of all work on one core, in nanoseconds. */
+    public static double totalNanos(Study study) {
+        double nanos = of(study).stream().mapToDouble(CellForecast::nanos).sum();
+        for (Experiment experiment : study.experiments()) {
+            for (int width : experiment.widths()) {
+                for (long trial = 0; trial < experiment.trials(); trial++) {
+                    nanos += examinationNanos(study, experiment, width, trial);
+                }
+            }
+        }
+        return nanos;
+    }
+
+    private static CellForecast cell(Experiment experiment, int width, StrategyChoice choice) {
+        Problem problem = experiment.problem();
+        Optional<BigDecimal> mean = Laws.law(problem.kind(), choice.strategy().name())
+                .map(law -> law.mean(width).value());
+        BigDecimal limit = BigDecimal.valueOf(experiment.queryLimit());
+        BigDecimal queries = mean.map(m -> m.min(limit)).orElse(limit);
+        Optional<String> remark = mean.filter(m -> m.compareTo(limit) > 0)
+                .map(m -> "mean " + Decimals.text(m, 0) + " is above the limit " + experiment.queryLimit()
+                        + ": most trials will be censored");
+        double perQuery = choice.engine().isPresent() ? sampling(choice.engine().get(), width) : QUERY;
+        double preparing = choice.engine().map(e -> preparing(e, width)).orElse(0.0);
+        double share = drawing(problem, width) / experiment.strategies().size();
+        long memory = problem.memoryBytes(width)
+                + choice.engine().map(e -> e.memoryBytes(width)).orElse(0L)
+                + choice.strategy().memoryBytes(width, experiment.queryLimit());
+        return new CellForecast(
+                new Cell(experiment.id(), width, choice.label()),
+                experiment.trials(),
+                queries,
+                LINE + share + preparing + queries.doubleValue() * perQuery,
+                memory,
+                remark);
+    }
+
+    private static double drawing(Problem problem, int width) {
+        return problem.memoryBytes(width) > 1 << 10 ? DRAW * Math.scalb(1.0, width) : 2000;
+    }
+
+    private static double preparing(Engine engine, int width) {
+        return switch (engine.name()) {
+            case "statevector" -> (2 * width + 2) * AMPLITUDE * Math.scalb(1.0, 2 * width);
+            case "fibre" -> SORT * width * Math.scalb(1.0, width);
+            default -> 0;
+        };
+    }
+
+    private static double sampling(Engine engine, int width) {
+        return engine.name().equals("annihilator") ? 100.0 : 300.0 + 20.0 * width;
+    }
+}
