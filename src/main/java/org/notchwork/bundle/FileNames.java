@@ -17,7 +17,7 @@ final class FileNames {
 
     /** Throws unless a name, without folders, may be used. */
     static void require(String name, String place) throws BundleFault {
-        if (name.startsWith(".")) {
+        if (name.startsWith(".") && !name.equals(".") && !name.equals("..")) {
             throw new BundleFault(
                     BundleFault.Reason.HIDDEN_FILE, shown(place), "a hidden file; a bundle has none, so remove it");
         }
