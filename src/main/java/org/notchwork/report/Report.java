@@ -1,15 +1,47 @@
 package org.notchwork.report;
 
-import java.nio.charset.StandardCharsets;
+import java.io.ByteArrayOutputStream;
+import java.io.IOException;
+import java.io.UncheckedIOException;
+import org.apache.pdfbox.pdmodel.PDDocument;
 import org.notchwork.bundle.Environment;
 import org.notchwork.bundle.Results;
+import org.notchwork.json.Printable;
 
-/** TEMP. */
+/** Makes the report. */
 public final class Report {
+
+    private static final int FOOT_TITLE = 60;
+    private static final int FOOT_SEAL = 16;
+
     private Report() {}
 
-    /** TEMP. */
+    /**
+     * Returns the report as the bytes of a PDF.
+     *
+     * @param results what the study came to
+     * @param seal the seal, 64 hexadecimal digits
+     * @param environment where and when it ran; the only source of dates
+     */
     public static byte[] pdf(Results results, String seal, Environment environment) {
-        return (results.study().title() + seal + environment.java()).getBytes(StandardCharsets.UTF_8);
+        try (PDDocument document = new PDDocument()) {
+            Fonts fonts = Fonts.load(document);
+            String title = Printable.escape(results.study().title());
+            try (Flow flow = new Flow(document, fonts)) {
+                new CoverSection(results, seal, environment).set(flow);
+                new ClaimsSection(results.claims()).set(flow);
+                new FiguresSection(results).set(flow);
+                new ChecksSection(results).set(flow);
+                new LimitsSection(results).set(flow);
+                String shortTitle = title.length() <= FOOT_TITLE ? title : title.substring(0, FOOT_TITLE) + "…";
+                flow.finish(shortTitle + " · seal " + seal.substring(0, FOOT_SEAL) + "… · " + environment.program());
+            }
+            Metadata.add(document, title, seal, environment);
+            ByteArrayOutputStream bytes = new ByteArrayOutputStream();
+            document.save(bytes);
+            return bytes.toByteArray();
+        } catch (IOException e) {
+            throw new UncheckedIOException("the report cannot be made: " + e.getMessage(), e);
+        }
     }
 }
