@@ -9,8 +9,9 @@ import tools.jackson.core.JsonParser;
 import tools.jackson.core.JsonToken;
 import tools.jackson.core.ObjectReadContext;
 import tools.jackson.core.StreamReadConstraints;
-import tools.jackson.core.StreamReadFeature;
 import tools.jackson.core.TokenStreamLocation;
+import tools.jackson.core.exc.StreamConstraintsException;
+import tools.jackson.core.exc.UnexpectedEndOfInputException;
 import tools.jackson.core.json.JsonFactory;
 
 /**
@@ -32,7 +33,6 @@ public final class JsonReader {
     public JsonReader(JsonLimits limits) {
         this.limits = limits;
         this.factory = JsonFactory.builder()
-                .enable(StreamReadFeature.STRICT_DUPLICATE_DETECTION)
                 .streamReadConstraints(StreamReadConstraints.builder()
                         .maxNestingDepth(limits.depth())
                         .maxStringLength(limits.text())
@@ -65,7 +65,7 @@ public final class JsonReader {
             }
             return value;
         } catch (JacksonException e) {
-            throw new JsonFault(place(e.getLocation()), firstLine(e.getOriginalMessage()));
+            throw new JsonFault(place(e.getLocation()), plain(e));
         }
     }
 
@@ -107,6 +107,9 @@ public final class JsonReader {
         TreeMap<String, JsonValue> members = new TreeMap<>();
         while (parser.nextToken() == JsonToken.PROPERTY_NAME) {
             String name = checked(parser, parser.currentName());
+            if (members.containsKey(name)) {
+                throw fault(parser, "a second member " + Fields.quoted(name) + "; names must differ");
+            }
             parser.nextToken();
             members.put(name, value(parser));
         }
@@ -152,12 +155,22 @@ public final class JsonReader {
         return new JsonFault(place(parser.currentTokenLocation()), what);
     }
 
+    /** Returns where a fault is; the tokenizer does not know where a limit was exceeded. */
     private static String place(TokenStreamLocation location) {
-        return "line " + Math.max(1, location.getLineNr()) + ", column " + Math.max(1, location.getColumnNr());
+        return location == null
+                ? "somewhere"
+                : "line " + Math.max(1, location.getLineNr()) + ", column " + Math.max(1, location.getColumnNr());
     }
 
-    private static String firstLine(String message) {
-        int end = message.indexOf('\n');
-        return end < 0 ? message : message.substring(0, end);
+    /** Returns what the tokenizer found wrong, in this project's words. */
+    private String plain(JacksonException fault) {
+        if (fault instanceof StreamConstraintsException) {
+            return "nested deeper than " + limits.depth() + " levels, a text longer than " + limits.text()
+                    + " characters, or a number longer than " + LONGEST_NUMBER;
+        }
+        if (fault instanceof UnexpectedEndOfInputException) {
+            return "the document ends too early";
+        }
+        return "this is not JSON; a comma, a bracket, a quotation mark or a value is wrong here";
     }
 }

@@ -49,13 +49,13 @@ final class FiguresSection {
                 Table.Column.left("sees", 29),
                 Table.Column.right("trials", 26),
                 Table.Column.right("solved", 28),
-                Table.Column.right("wrong", 26),
+                Table.Column.right("wrong", 29),
                 Table.Column.right("cens.", 25),
                 Table.Column.left("success", 45),
                 Table.Column.right("mean", 42),
                 Table.Column.right("s.d.", 40),
                 Table.Column.left("95 % of the mean", 78),
-                Table.Column.right("min/q1/median/q3/max", 80),
+                Table.Column.right("min/q1/med/q3/max", 80),
                 Table.Column.right("conf.", 24)));
         for (CellFigures cell : cells) {
             table.add(List.of(
