@@ -39,7 +39,13 @@ public final class Bag {
      * @param listed the digest in the manifest
      * @param found the digest of the bytes
      */
-    public record Mismatch(String path, String listed, String found) {}
+    public record Mismatch(String path, String listed, String found) {
+
+        /** Returns the manifest that lists the file. */
+        public String manifest() {
+            return path.startsWith(Layout.DATA) ? Layout.MANIFEST : Layout.TAG_MANIFEST;
+        }
+    }
 
     /** Opens a directory; throws unless it is a complete bag that is safe to read. */
     public static Bag open(Path directory, Limits limits) throws BundleFault, IOException {
@@ -103,10 +109,10 @@ public final class Bag {
     private static void requireComplete(BundleFiles files, Map<String, String> payload, Map<String, String> tags)
             throws BundleFault {
         for (String path : payload.keySet()) {
-            requireThere(files, path);
+            requireThere(files, path, Layout.MANIFEST);
         }
         for (String path : tags.keySet()) {
-            requireThere(files, path);
+            requireThere(files, path, Layout.TAG_MANIFEST);
         }
         for (String path : files.sizes().keySet()) {
             boolean known = payload.containsKey(path) || tags.containsKey(path) || path.equals(Layout.TAG_MANIFEST);
@@ -120,9 +126,9 @@ public final class Bag {
         }
     }
 
-    private static void requireThere(BundleFiles files, String path) throws BundleFault {
+    private static void requireThere(BundleFiles files, String path, String manifest) throws BundleFault {
         if (!files.has(path)) {
-            throw new BundleFault(BundleFault.Reason.NOT_THERE, path, "listed in a manifest but not there");
+            throw new BundleFault(BundleFault.Reason.NOT_THERE, manifest, "lists " + path + ", which is not there");
         }
     }
 

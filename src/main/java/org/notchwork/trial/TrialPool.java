@@ -72,6 +72,9 @@ public final class TrialPool {
             Queue<Future<List<R>>> underWay = new ArrayDeque<>();
             Iterator<TrialRange> rest = ranges.iterator();
             while (rest.hasNext() || !underWay.isEmpty()) {
+                if (Thread.interrupted()) {
+                    throw new InterruptedException();
+                }
                 while (rest.hasNext() && underWay.size() < AHEAD * threads) {
                     TrialRange range = rest.next();
                     underWay.add(workers.submit(() -> all(range, work)));

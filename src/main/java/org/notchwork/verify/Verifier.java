@@ -69,7 +69,8 @@ public final class Verifier {
 
     private void hashes(Bag bag) throws IOException {
         Findings findings = new Findings();
-        bag.mismatches().forEach(m -> findings.add(Finding.of(m.path(), m.found(), m.listed())));
+        bag.mismatches()
+                .forEach(m -> findings.add(Finding.of(m.path(), m.found(), m.listed() + " (" + m.manifest() + ")")));
         reports.add(StageReport.of(
                 Stage.HASHES,
                 findings,
