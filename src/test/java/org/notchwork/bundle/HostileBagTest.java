@@ -22,7 +22,7 @@ import org.junit.jupiter.params.provider.MethodSource;
 import org.junit.jupiter.params.provider.ValueSource;
 import org.notchwork.bundle.BundleFault.Reason;
 
-class BagTest {
+class HostileBagTest {
 
     private static final String DIGEST = "a".repeat(64);
 
@@ -125,7 +125,7 @@ class BagTest {
                                                 .replaceFirst("[0-9a-f]{64}  bag-info.txt\n", "")),
                         Reason.NOT_LISTED,
                         "bag-info.txt"),
-                Arguments.of("a missing file", bag().remove("data/two.txt"), Reason.NOT_THERE, "data/two.txt"),
+                Arguments.of("a missing file", bag().remove("data/two.txt"), Reason.NOT_THERE, "manifest-sha256.txt"),
                 Arguments.of("an empty file", bag().put("data/two.txt", ""), Reason.EMPTY_FILE, "data/two.txt"),
                 Arguments.of(
                         "an empty manifest",
@@ -197,6 +197,13 @@ class BagTest {
             int number = reason == Reason.LISTED_TWICE ? 2 : 1;
             assertEquals("manifest-sha256.txt, line " + number, fault.place());
         }
+    }
+
+    @Test
+    void aMissingFileIsNamed() throws IOException {
+        BundleFault fault =
+                refused(Reason.NOT_THERE, bag().remove("data/two.txt").write(folder));
+        assertEquals("lists data/two.txt, which is not there", fault.getMessage());
     }
 
     @Test

@@ -22,7 +22,7 @@ import org.notchwork.json.JsonReader;
 import org.notchwork.json.JsonValue;
 import org.notchwork.study.StudyReader;
 
-class BundleWriterTest {
+class WrittenBundleTest {
 
     @TempDir
     private static Path shared;

@@ -17,7 +17,7 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
 /** The lines of the read-me, run by the tools that a stranger has, on a right bundle and on spoiled ones. */
-class StockToolsTest {
+class ReadMeLinesTest {
 
     private static final SampleRun RUN = new SampleRun();
 

@@ -19,7 +19,7 @@ import org.junit.jupiter.api.Test;
 import tools.jackson.databind.JsonNode;
 import tools.jackson.databind.ObjectMapper;
 
-class MerkleTreeTest {
+class MerkleProofTest {
 
     private static final Path VECTORS = Path.of("../shared/vectors/merkle");
 
