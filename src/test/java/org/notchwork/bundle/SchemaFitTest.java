@@ -29,7 +29,7 @@ import org.notchwork.json.JsonValue;
 import org.notchwork.study.StudyJson;
 
 /** The schemas against what is written and against the same spoiled at every place. The validator is networknt's. */
-class SchemasTest {
+class SchemaFitTest {
 
     private static final SampleRun RUN = new SampleRun();
 
