@@ -197,6 +197,7 @@ class CommandLineTest {
                 folder.resolve("large.json"),
                 Studies.SMALL
                         .replace("\"widths\": [6]", "\"widths\": [26]")
+                        .replace("cut/6", "cut/26")
                         .replace("\"trials\": 12", "\"trials\": 2"));
         ChildJvm.Ended ended = ChildJvm.running().withFlags(List.of("-Xmx64m")).run(folder, "run", large.toString());
         assertEquals(11, ended.exit(), ended.err());
