@@ -2,11 +2,9 @@ package org.notchwork.bundle;
 
 import java.io.IOException;
 import java.io.InputStream;
-import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.security.MessageDigest;
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
@@ -27,6 +25,7 @@ public final class Bag {
 
     private final BundleFiles files;
     private final Map<String, String> listed;
+    private final Map<String, String> found = new TreeMap<>();
 
     private Bag(BundleFiles files, Map<String, String> listed) {
         this.files = files;
@@ -51,11 +50,8 @@ public final class Bag {
     /** Opens a directory; throws unless it is a complete bag that is safe to read. */
     public static Bag open(Path directory, Limits limits) throws BundleFault, IOException {
         BundleFiles files = BundleFiles.list(directory, limits);
+        requireDeclaration(files);
         requireTags(files);
-        if (!Arrays.equals(files.read(Layout.BAGIT, TAG_LIMIT), DECLARATION.getBytes(StandardCharsets.UTF_8))) {
-            throw new BundleFault(
-                    BundleFault.Reason.DECLARATION, Layout.BAGIT, "not the declaration of a version 1.0 bag in UTF-8");
-        }
         for (Map.Entry<String, Long> file : files.sizes().entrySet()) {
             if (file.getValue() == 0) {
                 throw new BundleFault(BundleFault.Reason.EMPTY_FILE, file.getKey(), "the file is empty");
@@ -65,13 +61,13 @@ public final class Bag {
         Map<String, String> tags =
                 Manifest.read(Layout.TAG_MANIFEST, files.read(Layout.TAG_MANIFEST, TAG_LIMIT), false);
         requireComplete(files, payload, tags);
-        PayloadOxum.require(files.read(Layout.BAG_INFO, TAG_LIMIT), files.sizes());
+        BagInfo.require(files.read(Layout.BAG_INFO, TAG_LIMIT), PayloadOxum.of(files.sizes()));
         Map<String, String> listed = new TreeMap<>(payload);
         listed.putAll(tags);
         return new Bag(files, listed);
     }
 
-    private static void requireTags(BundleFiles files) throws BundleFault {
+    private static void requireDeclaration(BundleFiles files) throws BundleFault, IOException {
         if (files.has("fetch.txt")) {
             throw new BundleFault(
                     BundleFault.Reason.FETCH, "fetch.txt", "files to be fetched; a bundle holds all its files");
@@ -80,6 +76,16 @@ public final class Bag {
             throw new BundleFault(
                     BundleFault.Reason.NOT_A_BUNDLE, Layout.BAGIT, "missing, so this folder is not a bundle");
         }
+        List<String> lines = TagText.lines(Layout.BAGIT, files.read(Layout.BAGIT, TAG_LIMIT));
+        if (!lines.equals(DECLARATION.lines().toList())) {
+            throw new BundleFault(
+                    BundleFault.Reason.DECLARATION,
+                    Layout.BAGIT,
+                    "not the two lines that declare a bag of version 1.0 in UTF-8; other versions are not read");
+        }
+    }
+
+    private static void requireTags(BundleFiles files) throws BundleFault {
         for (String path : files.sizes().keySet()) {
             boolean manifest = path.startsWith("manifest-") || path.startsWith("tagmanifest-");
             if (manifest && !TAGS.contains(path)) {
@@ -136,13 +142,14 @@ public final class Bag {
         return listed.get(path);
     }
 
-    /** Returns the files whose bytes do not have the listed digest, in order of their paths. */
+    /** Hashes all files and returns those whose bytes do not have the listed digest, in order of their paths. */
     public List<Mismatch> mismatches() throws IOException {
         List<Mismatch> mismatches = new ArrayList<>();
         for (Map.Entry<String, String> entry : listed.entrySet()) {
-            String found = digest(entry.getKey());
-            if (!found.equals(entry.getValue())) {
-                mismatches.add(new Mismatch(entry.getKey(), entry.getValue(), found));
+            String digest = digest(entry.getKey());
+            found.put(entry.getKey(), digest);
+            if (!digest.equals(entry.getValue())) {
+                mismatches.add(new Mismatch(entry.getKey(), entry.getValue(), digest));
             }
         }
         return mismatches;
@@ -153,9 +160,19 @@ public final class Bag {
         return files.open(path);
     }
 
-    /** Reads a small file, at most this many bytes. */
+    /**
+     * Reads a small file, at most this many bytes.
+     *
+     * @throws BundleFault if there are more, or if they are not the bytes that {@link #mismatches} hashed before
+     */
     public byte[] read(String path, int limit) throws BundleFault, IOException {
-        return files.read(path, limit);
+        byte[] bytes = files.read(path, limit);
+        String hashed = found.get(path);
+        if (hashed != null && !hashed.equals(Digests.hex(bytes))) {
+            throw new BundleFault(
+                    BundleFault.Reason.CHANGED, path, "changed while it was read; copy the bundle and check the copy");
+        }
+        return bytes;
     }
 
     private String digest(String path) throws IOException {

@@ -18,12 +18,22 @@ public final class BundleFault extends Exception {
         SPECIAL_FILE,
         /** A name that a bundle may not use. */
         NAME,
+        /** A name that begins with a point, which many tools do not show. */
+        HIDDEN_FILE,
         /** Two names that some systems cannot tell apart. */
         NAME_CLASH,
         /** More files, bytes or depth than the reader's limits allow. */
         LIMIT,
         /** The bag declaration is not that of RFC 8493, version 1.0, in UTF-8. */
         DECLARATION,
+        /** A file begins with a byte-order mark. */
+        BYTE_ORDER_MARK,
+        /** A file that should be UTF-8 is not. */
+        ENCODING,
+        /** A line does not end with one line feed and nothing else. */
+        LINE_END,
+        /** A line of the bag's metadata is not of the one form. */
+        BAG_INFO,
         /** The bag leaves files to be fetched. */
         FETCH,
         /** A manifest of another algorithm, or none of SHA-256. */

@@ -2,11 +2,15 @@ package org.notchwork.bundle;
 
 import java.io.IOException;
 import java.io.InputStream;
+import java.nio.file.DirectoryIteratorException;
 import java.nio.file.DirectoryStream;
 import java.nio.file.Files;
 import java.nio.file.LinkOption;
 import java.nio.file.Path;
 import java.nio.file.attribute.BasicFileAttributes;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
 
@@ -48,35 +52,49 @@ final class BundleFiles {
 
     private static void list(Path folder, String prefix, Map<String, Long> sizes, Limits limits)
             throws BundleFault, IOException {
-        try (DirectoryStream<Path> entries = Files.newDirectoryStream(folder)) {
-            for (Path entry : entries) {
-                String name = entry.getFileName().toString();
-                BasicFileAttributes attributes =
-                        Files.readAttributes(entry, BasicFileAttributes.class, LinkOption.NOFOLLOW_LINKS);
-                if (attributes.isDirectory() && prefix.isEmpty() && name.equals("data")) {
-                    list(entry, Layout.DATA, sizes, limits);
-                    continue;
-                }
-                String path = prefix + name;
-                FileNames.require(name, path);
-                if (!attributes.isRegularFile()) {
-                    throw new BundleFault(
-                            BundleFault.Reason.SPECIAL_FILE,
-                            path,
-                            "not a plain file; links and folders are not allowed");
-                }
-                if (attributes.size() > limits.fileBytes()) {
-                    throw new BundleFault(
-                            BundleFault.Reason.LIMIT,
-                            path,
-                            attributes.size() + " bytes, above the limit " + limits.fileBytes());
-                }
-                sizes.put(path, attributes.size());
-                if (sizes.size() > limits.files()) {
-                    throw new BundleFault(BundleFault.Reason.LIMIT, path, "more than " + limits.files() + " files");
-                }
+        for (Path entry : entries(folder, limits)) {
+            String name = entry.getFileName().toString();
+            BasicFileAttributes attributes =
+                    Files.readAttributes(entry, BasicFileAttributes.class, LinkOption.NOFOLLOW_LINKS);
+            if (attributes.isDirectory() && prefix.isEmpty() && name.equals("data")) {
+                list(entry, Layout.DATA, sizes, limits);
+                continue;
+            }
+            String path = prefix + name;
+            FileNames.require(name, path);
+            if (!attributes.isRegularFile()) {
+                throw new BundleFault(
+                        BundleFault.Reason.SPECIAL_FILE, path, "not a plain file; links and folders are not allowed");
+            }
+            if (attributes.size() > limits.fileBytes()) {
+                throw new BundleFault(
+                        BundleFault.Reason.LIMIT,
+                        path,
+                        attributes.size() + " bytes, above the limit " + limits.fileBytes());
+            }
+            sizes.put(path, attributes.size());
+            if (sizes.size() > limits.files()) {
+                throw new BundleFault(BundleFault.Reason.LIMIT, path, "more than " + limits.files() + " files");
             }
         }
+    }
+
+    /** Lists a folder sorted, so that the first fault is the same on every system; gives up above the limit. */
+    private static List<Path> entries(Path folder, Limits limits) throws BundleFault, IOException {
+        List<Path> entries = new ArrayList<>();
+        try (DirectoryStream<Path> stream = Files.newDirectoryStream(folder)) {
+            for (Path entry : stream) {
+                entries.add(entry);
+                if (entries.size() > limits.files() + 1) {
+                    throw new BundleFault(
+                            BundleFault.Reason.LIMIT, folder.toString(), "more than " + limits.files() + " files");
+                }
+            }
+        } catch (DirectoryIteratorException e) {
+            throw e.getCause();
+        }
+        entries.sort(Comparator.comparing(entry -> entry.getFileName().toString()));
+        return entries;
     }
 
     /** Returns each file's path below the bundle and its size in bytes, sorted. */

@@ -57,8 +57,13 @@ public final class BundleWriter implements AutoCloseable {
      */
     public static BundleWriter begin(Study study, Path target, boolean replace) throws IOException {
         Staging staging = Staging.begin(target, replace);
-        Files.createDirectory(staging.folder().resolve("data"));
-        return new BundleWriter(study, staging);
+        try {
+            Files.createDirectory(staging.folder().resolve("data"));
+            return new BundleWriter(study, staging);
+        } catch (IOException e) {
+            staging.close();
+            throw e;
+        }
     }
 
     /**
@@ -111,11 +116,12 @@ public final class BundleWriter implements AutoCloseable {
     /** Removes what was written, unless the bundle is finished. */
     @Override
     public void close() throws IOException {
-        if (open != null) {
-            open.out.close();
-            open = null;
+        try (staging) {
+            if (open != null) {
+                open.out.close();
+                open = null;
+            }
         }
-        staging.close();
     }
 
     private void tags(Environment environment) throws IOException {

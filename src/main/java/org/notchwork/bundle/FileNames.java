@@ -11,19 +11,38 @@ final class FileNames {
     private static final Pattern FORM = Pattern.compile("[A-Za-z0-9][A-Za-z0-9._-]{0,99}");
     private static final Pattern DEVICE = Pattern.compile("(?i)(con|prn|aux|nul|com[0-9]|lpt[0-9])(\\..*)?");
 
+    private static final int LONGEST_SHOWN = 120;
+
     private FileNames() {}
 
     /** Throws unless a name, without folders, may be used. */
     static void require(String name, String place) throws BundleFault {
+        if (name.startsWith(".") && !name.equals(".") && !name.equals("..")) {
+            throw new BundleFault(
+                    BundleFault.Reason.HIDDEN_FILE, shown(place), "a hidden file; a bundle has none, so remove it");
+        }
         if (!FORM.matcher(name).matches()
                 || name.endsWith(".")
                 || DEVICE.matcher(name).matches()) {
             throw new BundleFault(
                     BundleFault.Reason.NAME,
-                    place,
+                    shown(place),
                     "a name that a bundle may not use; letters, digits, '.', '_' and '-' are allowed, the first a"
                             + " letter or digit, and no device names");
         }
+    }
+
+    /** Returns a name as a message shows it: in printable ASCII, other characters by their code points. */
+    private static String shown(String place) {
+        StringBuilder text = new StringBuilder();
+        place.codePoints().limit(LONGEST_SHOWN).forEach(c -> {
+            if (c >= ' ' && c <= '~') {
+                text.appendCodePoint(c);
+            } else {
+                text.append(String.format(Locale.ROOT, "\\u{%04x}", c));
+            }
+        });
+        return text.toString();
     }
 
     /** Throws if two names are the same to a system that ignores case. */

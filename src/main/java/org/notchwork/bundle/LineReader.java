@@ -65,9 +65,9 @@ public final class LineReader implements AutoCloseable {
     private Optional<byte[]> end(ByteArrayOutputStream pieces) throws BundleFault {
         if (pieces.size() > 0) {
             throw new BundleFault(
-                    BundleFault.Reason.MANIFEST_LINE,
+                    BundleFault.Reason.LINE_END,
                     file + ", line " + (number + 1),
-                    "the last line has no line feed");
+                    "the last line has no line feed; every line ends with one");
         }
         return Optional.empty();
     }

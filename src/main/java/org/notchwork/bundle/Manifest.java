@@ -1,6 +1,5 @@
 package org.notchwork.bundle;
 
-import java.nio.charset.StandardCharsets;
 import java.util.Map;
 import java.util.TreeMap;
 import java.util.regex.Matcher;
@@ -36,13 +35,9 @@ final class Manifest {
      * @return path to digest
      */
     static Map<String, String> read(String file, byte[] bytes, boolean payload) throws BundleFault {
-        String text = new String(bytes, StandardCharsets.UTF_8);
-        if (!text.endsWith("\n")) {
-            throw new BundleFault(BundleFault.Reason.MANIFEST_LINE, file, "the last line has no line feed");
-        }
         Map<String, String> digests = new TreeMap<>();
         int number = 0;
-        for (String line : text.substring(0, text.length() - 1).split("\n", -1)) {
+        for (String line : TagText.lines(file, bytes)) {
             number++;
             String place = file + ", line " + number;
             Matcher matcher = LINE.matcher(line);

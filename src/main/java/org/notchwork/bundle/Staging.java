@@ -1,9 +1,11 @@
 package org.notchwork.bundle;
 
 import java.io.IOException;
+import java.nio.ByteBuffer;
 import java.nio.channels.FileChannel;
 import java.nio.channels.FileLock;
 import java.nio.channels.OverlappingFileLockException;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.FileVisitResult;
 import java.nio.file.Files;
 import java.nio.file.LinkOption;
@@ -12,6 +14,7 @@ import java.nio.file.SimpleFileVisitor;
 import java.nio.file.StandardCopyOption;
 import java.nio.file.StandardOpenOption;
 import java.nio.file.attribute.BasicFileAttributes;
+import java.util.Arrays;
 
 /**
  * A hidden folder beside a final place, and the step that gives it the final name.
@@ -20,6 +23,9 @@ import java.nio.file.attribute.BasicFileAttributes;
  * with the process, however that ends. What an earlier run left behind is removed when the next one begins.
  */
 final class Staging implements AutoCloseable {
+
+    /** Beyond what the file holds: some systems keep others from reading a locked byte. */
+    private static final long LOCKED_BYTE = 1 << 20;
 
     private final Path target;
     private final boolean replace;
@@ -47,12 +53,31 @@ final class Staging implements AutoCloseable {
         requireFree(place, replace);
         Files.createDirectories(place.getParent());
         Path lockFile = hidden(place, "lock");
-        FileChannel channel = FileChannel.open(lockFile, StandardOpenOption.CREATE, StandardOpenOption.WRITE);
+        FileChannel channel = locked(lockFile, target);
         try {
-            FileLock lock = channel.tryLock();
-            if (lock == null) {
+            Staging staging = new Staging(place, replace, lockFile, channel);
+            staging.recover();
+            requireFree(place, replace);
+            delete(staging.folder);
+            Files.createDirectory(staging.folder);
+            return staging;
+        } catch (IOException | RuntimeException e) {
+            Files.deleteIfExists(lockFile);
+            channel.close();
+            throw e;
+        }
+    }
+
+    /** Takes the lock; the process keeps it until the channel is closed. */
+    private static FileChannel locked(Path lockFile, Path target) throws IOException {
+        FileChannel channel = FileChannel.open(
+                lockFile, StandardOpenOption.CREATE, StandardOpenOption.WRITE, LinkOption.NOFOLLOW_LINKS);
+        try {
+            FileLock lock = channel.tryLock(LOCKED_BYTE, 1, false);
+            if (lock == null || !isStillNamed(lockFile, channel)) {
                 throw new IOException(target + ": another run is writing here; wait for it or name another folder");
             }
+            return channel;
         } catch (OverlappingFileLockException e) {
             channel.close();
             throw new IOException(target + ": this run is writing here already", e);
@@ -60,11 +85,28 @@ final class Staging implements AutoCloseable {
             channel.close();
             throw e;
         }
-        Staging staging = new Staging(place, replace, lockFile, channel);
-        delete(staging.folder);
-        delete(staging.old);
-        Files.createDirectory(staging.folder);
-        return staging;
+    }
+
+    /**
+     * Returns whether the locked file is the one that the name leads to. A run that ends removes its lock file, so
+     * another may hold the lock of a file without a name while a third creates a new one.
+     */
+    private static boolean isStillNamed(Path lockFile, FileChannel channel) throws IOException {
+        String holder =
+                ProcessHandle.current().pid() + "/" + Thread.currentThread().getId();
+        byte[] token = holder.getBytes(StandardCharsets.US_ASCII);
+        channel.truncate(0);
+        channel.write(ByteBuffer.wrap(token), 0);
+        return Files.isRegularFile(lockFile, LinkOption.NOFOLLOW_LINKS)
+                && Arrays.equals(token, Files.readAllBytes(lockFile));
+    }
+
+    /** Brings back a bundle that a run moved aside before it died, or removes it if the new one has its name. */
+    private void recover() throws IOException {
+        if (Files.exists(old, LinkOption.NOFOLLOW_LINKS) && !Files.exists(target, LinkOption.NOFOLLOW_LINKS)) {
+            Files.move(old, target, StandardCopyOption.ATOMIC_MOVE);
+        }
+        delete(old);
     }
 
     /** Returns the folder to fill. */
@@ -80,9 +122,14 @@ final class Staging implements AutoCloseable {
         if (Files.exists(target, LinkOption.NOFOLLOW_LINKS)) {
             Files.move(target, old, StandardCopyOption.ATOMIC_MOVE);
         }
-        Files.move(folder, target, StandardCopyOption.ATOMIC_MOVE);
-        force(target.getParent());
+        try {
+            Files.move(folder, target, StandardCopyOption.ATOMIC_MOVE);
+        } catch (IOException e) {
+            recover();
+            throw e;
+        }
         complete = true;
+        force(target.getParent());
         delete(old);
     }
 
@@ -93,8 +140,8 @@ final class Staging implements AutoCloseable {
             if (!complete) {
                 delete(folder);
             }
-            Files.deleteIfExists(lockFile);
         } finally {
+            Files.deleteIfExists(lockFile);
             channel.close();
         }
     }

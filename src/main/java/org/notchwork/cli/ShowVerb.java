@@ -62,7 +62,7 @@ final class ShowVerb implements Verb {
                 Results results = contents.results();
                 new ResultsScreen(terminal.out()).print(results);
                 terminal.out().println("seal:   " + Seal.groups(contents.seal()));
-                terminal.out().println("shown as computed from the trial lines; verify checks the bundle");
+                terminal.out().println("shown as written in the bundle; verify checks it");
             }
             return Exit.GOOD;
         } catch (BundleFault e) {

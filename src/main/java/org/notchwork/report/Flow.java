@@ -24,6 +24,7 @@ final class Flow implements AutoCloseable {
     private static final float TOP = PDRectangle.A4.getHeight() - 46;
     private static final float BOTTOM = 54;
     private static final float FOOT = 32;
+    private static final float FOOT_GAP = 80;
 
     private final PDDocument document;
     private final Fonts fonts;
@@ -155,7 +156,7 @@ final class Flow implements AutoCloseable {
                 foot.beginText();
                 foot.setFont(font, size);
                 foot.newLineAtOffset(MARGIN, FOOT);
-                foot.showText(Fonts.drawable(font, left));
+                foot.showText(Wrap.cut(font, size, left, MEASURE - FOOT_GAP));
                 foot.endText();
                 foot.beginText();
                 foot.setFont(font, size);

@@ -34,7 +34,8 @@ public final class Report {
                 new ChecksSection(results).set(flow);
                 new LimitsSection(results).set(flow);
                 String shortTitle = title.length() <= FOOT_TITLE ? title : title.substring(0, FOOT_TITLE) + "…";
-                flow.finish(shortTitle + " · seal " + seal.substring(0, FOOT_SEAL) + "… · " + environment.program());
+                flow.finish(
+                        "seal " + seal.substring(0, FOOT_SEAL) + "… · " + environment.program() + " · " + shortTitle);
             }
             Metadata.add(document, title, seal, environment);
             ByteArrayOutputStream bytes = new ByteArrayOutputStream();

@@ -34,6 +34,14 @@ final class Wrap {
         return lines;
     }
 
+    /** Returns the text in one line, its end cut off where it is wider than the measure. */
+    static String cut(PDFont font, float size, String text, float measure) throws IOException {
+        String whole = Fonts.drawable(font, text);
+        return Fonts.width(font, size, whole) <= measure
+                ? whole
+                : pieces(font, size, whole.replace(' ', '\u00a0'), measure).get(0);
+    }
+
     private static List<String> pieces(PDFont font, float size, String word, float measure) throws IOException {
         if (Fonts.width(font, size, word) <= measure) {
             return List.of(word);

@@ -12,7 +12,7 @@ import org.notchwork.json.JsonObject;
  *
  * <p>The 32 bytes SHA-256(prefix ‖ canonical JSON of the address and the seed) key a Philox4x64-10 generator: bytes
  * 0 to 15 are the two key words, bytes 16 to 31 the two high words of the counter, all big-endian; the two low words
- * start at 0. Different addresses thus get different keys or disjoint counters, unless SHA-256 collides.
+ * count the blocks of four words, the first of which is block 1. Different addresses thus get different keys or disjoint counters, unless SHA-256 collides.
  */
 public final class SeedTree {
 
