@@ -35,7 +35,8 @@ final class AllSecrets {
             Address address = new Address(experiment.id(), width, secrets, ROLE);
             Instance instance = experiment.problem().drawHiding(hidden, width, seeds.stream(address));
             Meter meter = new Meter(1L << (width + 1));
-            Attempt attempt = strategy.attempt(new Oracle(instance.function(), meter), seeds.stream(address));
+            Address own = Address.strategy(experiment.id(), width, secrets, strategy.name());
+            Attempt attempt = strategy.attempt(new Oracle(instance.function(), meter), seeds.stream(own));
             if (!(attempt instanceof Attempt.Answered answered
                             && answered.answer().equals(hidden))
                     && wrong.isEmpty()) {

@@ -31,12 +31,31 @@ public final class CertificateCheck {
             return Optional.of(new Wrong("", answer.toString(), "a period"));
         }
         if (certificate instanceof Certificate.Collision collision) {
-            return pair(function, period.s(), collision.pair(), "/collision");
+            return widths(function, period.s(), collision.pair(), "/collision")
+                    .or(() -> pair(function, period.s(), collision.pair(), "/collision"));
         }
         Certificate.Equations equations = (Certificate.Equations) certificate;
-        return equations(period.s(), equations.words())
+        return widths(function, period.s(), equations.confirmation(), "/equations/confirmation")
+                .or(() -> equations(period.s(), equations.words()))
                 .or(() -> startsAtZero(equations.confirmation()))
                 .or(() -> pair(function, period.s(), equations.confirmation(), "/equations/confirmation"));
+    }
+
+    /** A word of another width than the function's cannot even be compared. */
+    private static Optional<Wrong> widths(BitFunction function, Word period, Pair pair, String at) {
+        if (period.width() != function.width()) {
+            return Optional.of(new Wrong("", bits(period), "a period of " + function.width() + " bits"));
+        }
+        if (pair.x().width() != function.width()) {
+            return Optional.of(new Wrong(at, bits(pair.x()), "points of " + function.width() + " bits"));
+        }
+        return pair.fx().width() == function.valueWidth()
+                ? Optional.empty()
+                : Optional.of(new Wrong(at, bits(pair.fx()), "values of " + function.valueWidth() + " bits"));
+    }
+
+    private static String bits(Word word) {
+        return word.width() + " bits";
     }
 
     private static Optional<Wrong> pair(BitFunction function, Word period, Pair pair, String at) {
@@ -68,6 +87,10 @@ public final class CertificateCheck {
 
     private static Optional<Wrong> equations(Word period, List<Word> words) {
         for (int i = 0; i < words.size(); i++) {
+            if (words.get(i).width() != period.width()) {
+                return Optional.of(new Wrong(
+                        "/equations/words/" + i, bits(words.get(i)), "a word of " + period.width() + " bits"));
+            }
             if (words.get(i).dot(period) != 0) {
                 return Optional.of(
                         new Wrong("/equations/words/" + i, words.get(i).hex(), "a word orthogonal to " + period.hex()));

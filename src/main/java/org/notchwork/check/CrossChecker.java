@@ -97,8 +97,15 @@ public final class CrossChecker {
                     CheckKind.ENGINES,
                     subject,
                     tally.engines(),
-                    "every engine gives 2^(1-n) to each word orthogonal to the period and 0 to the others, exactly"));
+                    "every engine gives 2^(1-n) to each word orthogonal to the period and 0 to the others, exactly"
+                            + sample(experiment, width)));
         }
+    }
+
+    private static String sample(Experiment experiment, int width) {
+        return InstanceExaminer.samplesEngines(experiment, width)
+                ? "; on the first " + InstanceExaminer.FIRST_INSTANCES + " instances"
+                : "";
     }
 
     private static void fromLines(

@@ -12,6 +12,7 @@ import org.notchwork.problem.BitFunction;
 public final class ExhaustiveSearch {
 
     private static final int NOWHERE = -1;
+    private static final int MOST_BITS = 20;
 
     private ExhaustiveSearch() {}
 
@@ -37,13 +38,21 @@ public final class ExhaustiveSearch {
 
     /** Searches the whole domain. */
     public static Found search(BitFunction function) {
+        if (function.width() > MOST_BITS || function.valueWidth() > MOST_BITS) {
+            throw new IllegalArgumentException(
+                    "a search of " + function.width() + " bits with values of " + function.valueWidth());
+        }
         int size = 1 << function.width();
         int[] first = new int[1 << function.valueWidth()];
         int[] second = first.clone();
         Arrays.fill(first, NOWHERE);
         Arrays.fill(second, NOWHERE);
         for (int x = 0; x < size; x++) {
-            int value = (int) function.at(x);
+            long image = function.at(x);
+            if (image < 0 || image >= first.length) {
+                return new Found.Broken(x, x, "the value " + image + " has too many bits");
+            }
+            int value = (int) image;
             if (first[value] == NOWHERE) {
                 first[value] = x;
             } else if (second[value] == NOWHERE) {

@@ -19,12 +19,12 @@ import org.notchwork.trial.TrialRecord;
  * Examines one instance exhaustively: promise, hidden answer, answers given, outcome distributions of the engines.
  *
  * <p>From width 11 on the engines are compared on the first 16 instances of a width only, because a state vector of
- * both registers then takes seconds; the number compared is always told. Immutable.
+ * both registers then takes seconds; the check says so. Immutable.
  */
 public final class InstanceExaminer {
 
     private static final int ALL_INSTANCES_WIDTH = 10;
-    private static final long FIRST_INSTANCES = 16;
+    static final long FIRST_INSTANCES = 16;
 
     private final List<Engine> engines;
 
@@ -67,6 +67,11 @@ public final class InstanceExaminer {
                 ? Comparison.agreed()
                 : Comparison.differed(
                         "trial " + record.trial() + ": " + record.cell().label() + " answers otherwise");
+    }
+
+    /** Returns whether the engines are compared on the first instances of a cell only. */
+    static boolean samplesEngines(Experiment experiment, int width) {
+        return width > ALL_INSTANCES_WIDTH && experiment.trials() > FIRST_INSTANCES;
     }
 
     private Comparison engines(Experiment experiment, Instance instance, long trial, long period) {

@@ -10,9 +10,10 @@ import org.notchwork.law.QueryLaw;
 /**
  * Compares the observed mean number of queries of a cell with the exact expectation.
  *
- * <p>The standard error is the square root of the law's variance over the number of trials. Beyond five standard
- * errors the check differs: for a normal mean that happens by chance with probability 5.7 · 10^−7. Where trials were
- * censored the mean is not comparable.
+ * <p>The standard error is the square root of the law's variance over the number of trials, or of the sample's variance
+ * where the law gives none. Beyond five standard errors the check differs: for a normal mean that happens by chance
+ * with probability 5.7 · 10^−7. A law without variance is held to equality. Where trials were censored, or where neither
+ * the law nor the trials tell a spread, the mean is not comparable.
  */
 final class TheoryMean {
 
@@ -35,18 +36,13 @@ final class TheoryMean {
                     Optional.empty(),
                     CheckOutcome.NOT_COMPARABLE);
         }
-        BigDecimal variance = law.variance(width)
-                .or(() -> figures.queries().deviation().map(d -> d.multiply(d, Decimals.CONTEXT)))
+        Optional<BigDecimal> known = law.variance(width);
+        BigDecimal variance = known.or(() -> figures.queries().deviation().map(d -> d.multiply(d, Decimals.CONTEXT)))
                 .orElse(BigDecimal.ZERO);
         BigDecimal error = Decimals.root(variance.divide(BigDecimal.valueOf(figures.trials()), Decimals.CONTEXT));
         BigDecimal difference = figures.queries().mean().subtract(mean.value(), Decimals.CONTEXT);
         if (error.signum() == 0) {
-            return result(
-                    figures,
-                    expected,
-                    observed + ", standard error 0",
-                    Optional.empty(),
-                    difference.signum() == 0 ? CheckOutcome.AGREES : CheckOutcome.DIFFERS);
+            return withoutSpread(figures, expected, observed, difference.signum() == 0, known.isPresent());
         }
         BigDecimal deviation = difference.divide(error, Decimals.CONTEXT);
         return result(
@@ -55,6 +51,24 @@ final class TheoryMean {
                 observed + ", standard error " + Decimals.text(error),
                 Optional.of(Decimals.text(deviation, PLACES)),
                 deviation.abs().compareTo(LIMIT) <= 0 ? CheckOutcome.AGREES : CheckOutcome.DIFFERS);
+    }
+
+    private static CrossCheck withoutSpread(
+            CellFigures figures, String expected, String observed, boolean equal, boolean known) {
+        if (equal || known) {
+            return result(
+                    figures,
+                    expected,
+                    observed + ", standard error 0",
+                    Optional.empty(),
+                    equal ? CheckOutcome.AGREES : CheckOutcome.DIFFERS);
+        }
+        return result(
+                figures,
+                expected,
+                observed + ", not comparable: neither the law nor the trials tell a spread",
+                Optional.empty(),
+                CheckOutcome.NOT_COMPARABLE);
     }
 
     private static CrossCheck result(

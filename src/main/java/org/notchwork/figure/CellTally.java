@@ -24,6 +24,10 @@ final class CellTally {
         this.choice = choice;
     }
 
+    Cell cell() {
+        return cell;
+    }
+
     void add(TrialRecord record) {
         switch (record.outcome()) {
             case SOLVED -> solved++;

@@ -7,9 +7,9 @@ import org.apache.commons.statistics.distribution.TDistribution;
 /**
  * The two-sided 95 % quantile of Student's t distribution (Student, Biometrika 6 (1908)), to six places.
  *
- * <p>The library's root finder stops at about 10^−9, and two machines could round a value on a boundary to different
- * sides. Where a value lies within 10^−7 of one, the exact distribution at the boundary decides; so the six places are
- * the same everywhere.
+ * <p>The library's doubles are right to about 10^−14, but two machines could still round a value on a boundary
+ * to different sides. Where a value lies within 10^−9 of one, the exact distribution at the boundary decides; so the
+ * six places are the same everywhere.
  */
 final class StudentT {
 
@@ -18,14 +18,13 @@ final class StudentT {
     private static final int PLACES = 6;
     private static final BigDecimal HALF_STEP = new BigDecimal("0.0000005");
     private static final BigDecimal STEP = new BigDecimal("0.000001");
-    private static final BigDecimal DOUBT = new BigDecimal("1e-7");
+    private static final BigDecimal DOUBT = new BigDecimal("1e-9");
 
     private StudentT() {}
 
     /** Returns t with P(|T| ≤ t) = 0.95, rounded to six places. */
     static BigDecimal quantile(long degreesOfFreedom) {
-        BigDecimal value =
-                new BigDecimal(TDistribution.of((double) degreesOfFreedom).inverseCumulativeProbability(PROBABILITY));
+        BigDecimal value = new BigDecimal(exact(degreesOfFreedom));
         BigDecimal floor = value.setScale(PLACES, RoundingMode.FLOOR);
         BigDecimal boundary = floor.add(HALF_STEP);
         if (value.subtract(boundary).abs().compareTo(DOUBT) > 0) {
@@ -33,5 +32,10 @@ final class StudentT {
         }
         boolean above = StudentCentral.probability(boundary, degreesOfFreedom).compareTo(CENTRAL) < 0;
         return above ? floor.add(STEP) : floor;
+    }
+
+    /** Returns the quantile as the library computes it, not rounded. */
+    static double exact(long degreesOfFreedom) {
+        return TDistribution.of((double) degreesOfFreedom).inverseCumulativeProbability(PROBABILITY);
     }
 }

@@ -30,11 +30,16 @@ public final class SummaryBuilder {
         }
     }
 
-    /** Adds one instance faced by every strategy of its experiment. */
+    /**
+     * Adds one instance faced by every strategy of its experiment.
+     *
+     * @throws IllegalArgumentException if the records are not one a strategy, in the order of the study
+     */
     public void add(TrialGroup group) {
         Place place = new Place(group.experiment(), group.width());
         List<TrialRecord> records = group.records();
-        List<CellTally> tallies = cells.get(place);
+        List<CellTally> tallies = cells.getOrDefault(place, List.of());
+        requireFit(group, tallies);
         for (int i = 0; i < records.size(); i++) {
             tallies.get(i).add(records.get(i));
         }
@@ -58,6 +63,15 @@ public final class SummaryBuilder {
                         .flatMap(List::stream)
                         .map(PairTally::figures)
                         .toList());
+    }
+
+    private static void requireFit(TrialGroup group, List<CellTally> tallies) {
+        List<Cell> given = group.records().stream().map(TrialRecord::cell).toList();
+        List<Cell> wanted = tallies.stream().map(CellTally::cell).toList();
+        if (wanted.isEmpty() || !given.equals(wanted)) {
+            throw new IllegalArgumentException("trial " + group.trial() + " of " + group.experiment() + "/"
+                    + group.width() + " has the cells " + given + ", not " + wanted);
+        }
     }
 
     private static List<CellTally> tallies(Experiment experiment, int width) {
