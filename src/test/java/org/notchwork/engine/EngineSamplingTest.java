@@ -153,7 +153,7 @@ class EngineSamplingTest {
         Outcomes half = new Outcomes(new long[] {1, 1, 0, 0});
         assertEquals(0, half.differences(new Outcomes(new long[] {7, 7, 0, 0})));
         assertEquals(2, half.differences(new Outcomes(new long[] {1, 0, 1, 0})));
-        assertEquals(3, half.differences(new Outcomes(new long[] {2, 1, 1, 0})));
+        assertEquals(3, half.differences(new Outcomes(new long[] {3, 1, 1, 0})));
         assertThrows(IllegalArgumentException.class, () -> half.differences(new Outcomes(new long[] {1, 1})));
         assertThrows(IllegalArgumentException.class, () -> new Outcomes(new long[] {0, 0}));
         assertThrows(IllegalArgumentException.class, () -> new Outcomes(new long[] {2, -1}));

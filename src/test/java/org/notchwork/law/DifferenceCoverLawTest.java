@@ -38,8 +38,7 @@ class DifferenceCoverLawTest {
                     law.mean(width).fraction());
             assertPrints(
                     row.required("mean_floor_dec").asString(), law.mean(width).value());
-            assertEquals(
-                    OptionalLong.of(Long.parseLong(row.required("worst").asString())), law.worst(width));
+            assertEquals(OptionalLong.of(Long.parseLong(row.required("worst").asString())), law.worst(width));
         }
     }
 

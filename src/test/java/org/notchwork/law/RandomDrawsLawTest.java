@@ -55,9 +55,7 @@ class RandomDrawsLawTest {
             assertPrints(row.required("var_without").asString(), variance);
             assertPrints(row.required("sd_without").asString(), Decimals.root(variance));
             assertEquals(
-                    OptionalLong.of(
-                            Long.parseLong(row.required("worst_without").asString())),
-                    law.worst(width));
+                    OptionalLong.of(Long.parseLong(row.required("worst_without").asString())), law.worst(width));
         }
     }
 
@@ -77,8 +75,7 @@ class RandomDrawsLawTest {
             top = top.multiply(size.subtract(BigInteger.valueOf(2L * m)));
             bottom = bottom.multiply(size.subtract(BigInteger.valueOf(m)));
         }
-        assertEquals(
-                Decimals.text(mean, 40), Decimals.text(law.mean(width).value(), 40));
+        assertEquals(Decimals.text(mean, 40), Decimals.text(law.mean(width).value(), 40));
         assertEquals(
                 Decimals.text(square.subtract(mean.multiply(mean)), 40),
                 Decimals.text(law.variance(width).orElseThrow(), 40));
@@ -119,8 +116,9 @@ class RandomDrawsLawTest {
         for (int k = coefficients.size() - 1; k >= 0; k--) {
             sum = sum.divide(pairs, Decimals.CONTEXT).add(coefficients.get(k), Decimals.CONTEXT);
         }
-        BigDecimal pi = arcCotangent(5).multiply(BigDecimal.valueOf(16)).subtract(arcCotangent(239)
-                .multiply(BigDecimal.valueOf(4)));
+        BigDecimal pi = arcCotangent(5)
+                .multiply(BigDecimal.valueOf(16))
+                .subtract(arcCotangent(239).multiply(BigDecimal.valueOf(4)));
         return Decimals.root(pi.multiply(pairs)).multiply(sum, Decimals.CONTEXT);
     }
 

@@ -35,7 +35,9 @@ class SequentialScanLawTest {
         assertEquals(15, table.size());
         for (JsonNode row : table) {
             int width = row.required("n").asInt();
-            assertEquals(Optional.of(row.required("mean").asString()), law.mean(width).fraction());
+            assertEquals(
+                    Optional.of(row.required("mean").asString()),
+                    law.mean(width).fraction());
             assertPrints(row.required("mean_dec").asString(), law.mean(width).value());
             assertEquals(
                     Fractions.value(row.required("variance").asString()),
@@ -43,8 +45,7 @@ class SequentialScanLawTest {
             assertPrints(
                     row.required("sd").asString(),
                     Decimals.root(law.variance(width).orElseThrow()));
-            assertEquals(
-                    OptionalLong.of(Long.parseLong(row.required("worst").asString())), law.worst(width));
+            assertEquals(OptionalLong.of(Long.parseLong(row.required("worst").asString())), law.worst(width));
         }
     }
 

@@ -2,19 +2,41 @@ package org.notchwork.support;
 
 import org.notchwork.problem.BitFunction;
 
-/**
- * A function given by its values.
- *
- * @param width the number of input bits
- * @param valueWidth the number of bits of a value
- * @param values the values at 0, 1, …
- */
-@SuppressWarnings("ArrayRecordComponent")
-public record Given(int width, int valueWidth, long[] values) implements BitFunction {
+/** A function given by its values. */
+public final class Given implements BitFunction {
 
-    /** Returns the function with these values. */
+    private final int width;
+    private final int valueWidth;
+    private final long[] values;
+
+    private Given(int width, int valueWidth, long[] values) {
+        this.width = width;
+        this.valueWidth = valueWidth;
+        this.values = values;
+    }
+
+    /** Returns the function with these values at 0, 1, … */
     public static Given of(int width, int valueWidth, long... values) {
-        return new Given(width, valueWidth, values);
+        return new Given(width, valueWidth, values.clone());
+    }
+
+    /** Returns the function with the value at one point replaced. */
+    public static Given changed(BitFunction function, long point, long value) {
+        long[] values = new long[1 << function.width()];
+        for (int x = 0; x < values.length; x++) {
+            values[x] = x == point ? value : function.at(x);
+        }
+        return new Given(function.width(), function.valueWidth(), values);
+    }
+
+    @Override
+    public int width() {
+        return width;
+    }
+
+    @Override
+    public int valueWidth() {
+        return valueWidth;
     }
 
     @Override
