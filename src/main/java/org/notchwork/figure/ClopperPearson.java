@@ -17,6 +17,7 @@ final class ClopperPearson {
 
     private static final double ALPHA = 0.05;
     private static final BigDecimal TAIL = new BigDecimal("0.025");
+    private static final BigDecimal STEP = new BigDecimal("0.000001");
     private static final BigDecimal HALF_STEP = new BigDecimal("0.0000005");
     private static final BigDecimal DOUBT = new BigDecimal("1e-9");
 
@@ -53,7 +54,7 @@ final class ClopperPearson {
         boolean endIsAbove = lower
                 ? upperTail(solved, trials, boundary).compareTo(TAIL) < 0
                 : lowerTail(solved, trials, boundary).compareTo(TAIL) > 0;
-        return endIsAbove ? floor.add(HALF_STEP).add(HALF_STEP) : floor;
+        return endIsAbove ? floor.add(STEP) : floor;
     }
 
     /** Returns P(X ≥ k) for X binomial: rises with p. */
