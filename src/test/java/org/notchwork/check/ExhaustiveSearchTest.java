@@ -51,9 +51,8 @@ class ExhaustiveSearchTest {
         Instance instance = new XorPeriod(Labelling.TABLE).draw(5, Streams.named("changed"));
         for (long value = 0; value < 32; value++) {
             boolean same = value == instance.function().at(point);
-            assertInstanceOf(
-                    same ? ExhaustiveSearch.Found.Period.class : ExhaustiveSearch.Found.Broken.class,
-                    ExhaustiveSearch.search(Given.changed(instance.function(), point, value)));
+            ExhaustiveSearch.Found found = ExhaustiveSearch.search(Given.changed(instance.function(), point, value));
+            assertEquals(same, found instanceof ExhaustiveSearch.Found.Period);
         }
     }
 }
