@@ -37,17 +37,14 @@ class VerifySpeedBench {
 
     @Test
     void verifyingAHundredThousandTrials() throws Exception {
-        Path bundle = BundleFixture.make(
-                Studies.of(
-                        """
+        Path bundle = BundleFixture.make(Studies.of("""
                         {"format":"notchwork-study/1","title":"Many small trials (invented)","question":"?",
                          "seed":"a seed of a hundred thousand trials","cross-check-width":0,
                          "experiments":[{"id":"many","problem":{"kind":"xor-period"},"widths":[4,6,8,10],
                            "strategies":[{"name":"sequential-scan"},{"name":"random-draws"},{"name":"difference-cover"},
                              {"name":"fourier-sampling","engine":"fibre"},{"name":"fourier-sampling","engine":"annihilator"}],
                            "trials":5000,"query-limit":100000}]}
-                        """),
-                home.resolve("many"));
+                        """), home.resolve("many"));
         List<Double> plain = new ArrayList<>();
         List<Double> verified = new ArrayList<>();
         List<Double> ratios = new ArrayList<>();

@@ -3,59 +3,86 @@ package org.notchwork.claim;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
 import java.math.BigDecimal;
+import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.notchwork.figure.Interval;
 import org.notchwork.study.Bound;
 
-/** Verdicts by the interval 4 to 6, at every place of a bound; derived from the definition. */
 class BoundTestTest {
 
-    private static final Interval INTERVAL = new Interval(BigDecimal.valueOf(4), BigDecimal.valueOf(6));
+    private static final BigDecimal TWO = BigDecimal.valueOf(2);
+    private static final BigDecimal FOUR = BigDecimal.valueOf(4);
 
+    private static ClaimVerdict verdict(Bound bound, String low, String high, Trust trust) {
+        return BoundTest.of(bound, new Interval(new BigDecimal(low), new BigDecimal(high)), trust)
+                .verdict();
+    }
+
+    /** An interval, then the verdicts with both ends, the lower end and neither end trusted. */
     @ParameterizedTest
     @CsvSource({
-        "at-most, 7, BOTH_ENDS, SUPPORTED",
-        "at-most, 6, BOTH_ENDS, SUPPORTED",
-        "at-most, 5, BOTH_ENDS, UNDECIDED",
-        "at-most, 4, BOTH_ENDS, UNDECIDED",
-        "at-most, 3, BOTH_ENDS, REFUTED",
-        "at-most, 7, LOWER_END, UNDECIDED",
-        "at-most, 3, LOWER_END, REFUTED",
-        "at-most, 7, NEITHER_END, UNDECIDED",
-        "at-most, 3, NEITHER_END, UNDECIDED",
-        "at-least, 3, BOTH_ENDS, SUPPORTED",
-        "at-least, 4, BOTH_ENDS, SUPPORTED",
-        "at-least, 5, BOTH_ENDS, UNDECIDED",
-        "at-least, 6, BOTH_ENDS, UNDECIDED",
-        "at-least, 7, BOTH_ENDS, REFUTED",
-        "at-least, 3, LOWER_END, SUPPORTED",
-        "at-least, 7, LOWER_END, UNDECIDED",
-        "at-least, 3, NEITHER_END, UNDECIDED"
+        "1, 3.9, SUPPORTED, UNDECIDED",
+        "1, 4, SUPPORTED, UNDECIDED",
+        "1, 4.000001, UNDECIDED, UNDECIDED",
+        "4, 4, SUPPORTED, UNDECIDED",
+        "4, 5, UNDECIDED, UNDECIDED",
+        "4.000001, 5, REFUTED, REFUTED"
     })
-    void aOneSidedClaimIsJudgedByTheEndsThatCanBeTrusted(
-            String kind, BigDecimal at, Trust trust, ClaimVerdict verdict) {
-        Bound bound = kind.equals("at-most") ? new Bound.AtMost(at) : new Bound.AtLeast(at);
-        assertEquals(verdict, BoundTest.of(bound, INTERVAL, trust).verdict());
+    void atMostFour(String low, String high, ClaimVerdict both, ClaimVerdict lower) {
+        Bound bound = new Bound.AtMost(FOUR);
+        assertEquals(both, verdict(bound, low, high, Trust.BOTH_ENDS));
+        assertEquals(lower, verdict(bound, low, high, Trust.LOWER_END));
+        assertEquals(ClaimVerdict.UNDECIDED, verdict(bound, low, high, Trust.NEITHER_END));
     }
 
     @ParameterizedTest
     @CsvSource({
-        "4, 6, BOTH_ENDS, SUPPORTED",
-        "3, 7, BOTH_ENDS, SUPPORTED",
-        "5, 7, BOTH_ENDS, UNDECIDED",
-        "3, 5, BOTH_ENDS, UNDECIDED",
-        "1, 3, BOTH_ENDS, REFUTED",
-        "7, 9, BOTH_ENDS, REFUTED",
-        "3, 7, LOWER_END, UNDECIDED",
-        "1, 3, LOWER_END, REFUTED",
-        "7, 9, LOWER_END, UNDECIDED",
-        "3, 7, NEITHER_END, UNDECIDED"
+        "2.000001, 3, SUPPORTED, SUPPORTED",
+        "2, 3, SUPPORTED, SUPPORTED",
+        "1.999999, 3, UNDECIDED, UNDECIDED",
+        "1, 2, UNDECIDED, UNDECIDED",
+        "1, 1.999999, REFUTED, UNDECIDED"
     })
-    void aTwoSidedClaimIsSupportedByAnIntervalInsideOnly(
-            BigDecimal low, BigDecimal high, Trust trust, ClaimVerdict verdict) {
+    void atLeastTwo(String low, String high, ClaimVerdict both, ClaimVerdict lower) {
+        Bound bound = new Bound.AtLeast(TWO);
+        assertEquals(both, verdict(bound, low, high, Trust.BOTH_ENDS));
+        assertEquals(lower, verdict(bound, low, high, Trust.LOWER_END));
+        assertEquals(ClaimVerdict.UNDECIDED, verdict(bound, low, high, Trust.NEITHER_END));
+    }
+
+    @ParameterizedTest
+    @CsvSource({
+        "2, 4, SUPPORTED, UNDECIDED",
+        "3, 3, SUPPORTED, UNDECIDED",
+        "1.999999, 4, UNDECIDED, UNDECIDED",
+        "2, 4.000001, UNDECIDED, UNDECIDED",
+        "1, 5, UNDECIDED, UNDECIDED",
+        "1, 2, UNDECIDED, UNDECIDED",
+        "4, 5, UNDECIDED, UNDECIDED",
+        "1, 1.999999, REFUTED, UNDECIDED",
+        "4.000001, 5, REFUTED, REFUTED"
+    })
+    void betweenTwoAndFour(String low, String high, ClaimVerdict both, ClaimVerdict lower) {
+        Bound bound = new Bound.Between(TWO, FOUR);
+        assertEquals(both, verdict(bound, low, high, Trust.BOTH_ENDS));
+        assertEquals(lower, verdict(bound, low, high, Trust.LOWER_END));
+        assertEquals(ClaimVerdict.UNDECIDED, verdict(bound, low, high, Trust.NEITHER_END));
+    }
+
+    @Test
+    void theReasonNamesTheIntervalAndTheSide() {
+        Interval interval = new Interval(new BigDecimal("2.5"), new BigDecimal("3"));
         assertEquals(
-                verdict,
-                BoundTest.of(new Bound.Between(low, high), INTERVAL, trust).verdict());
+                "the 95 % interval 2.500000 to 3.000000 lies wholly at or below 4",
+                BoundTest.of(new Bound.AtMost(FOUR), interval, Trust.BOTH_ENDS).reason());
+        assertEquals(
+                "the 95 % interval 2.500000 to 3.000000 lies wholly above 2; trials were censored, so not every end"
+                        + " of it is a bound",
+                BoundTest.of(new Bound.AtMost(TWO), interval, Trust.LOWER_END).reason());
+        assertEquals(
+                "the 95 % interval 2.500000 to 3.000000 does not decide it",
+                BoundTest.of(new Bound.AtLeast(new BigDecimal("2.7")), interval, Trust.BOTH_ENDS)
+                        .reason());
     }
 }

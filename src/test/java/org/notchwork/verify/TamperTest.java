@@ -33,8 +33,7 @@ class TamperTest {
 
     private static final String CELLS = "summary.json";
     private static final String ALL = "trials-all.jsonl";
-    private static final String SMALLEST =
-            """
+    private static final String SMALLEST = """
             {"format":"notchwork-study/1","title":"T (invented)","question":"?","seed":"a seed of one trial","cross-check-width":0,
              "experiments":[{"id":"e","problem":{"kind":"xor-period"},"widths":[2],"trials":1,"query-limit":9,
                "strategies":[{"name":"fourier-sampling","engine":"fibre"}]}]}
