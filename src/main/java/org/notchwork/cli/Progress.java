@@ -14,6 +14,11 @@ final class Progress {
     private static final long LINE_NANOS = 30_000_000_000L;
     private static final int BAR = 28;
 
+    /** Before this much is done, or this much time has passed, a guess at the time left would be wild. */
+    private static final double LEAST_SHARE = 0.03;
+
+    private static final long LEAST_NANOS = 2_000_000_000L;
+
     private final Terminal terminal;
     private final String what;
     private final long start = System.nanoTime();
@@ -37,7 +42,8 @@ final class Progress {
         if (now < next) {
             return;
         }
-        String left = share > 0 ? ", about " + duration((now - start) * (1 - share) / share) + " left" : "";
+        boolean known = share > LEAST_SHARE && now - start > LEAST_NANOS;
+        String left = known ? ", about " + duration((now - start) * (1 - share) / share) + " left" : "";
         String percent = String.format(Locale.ROOT, "%3.0f %%", share * 100);
         if (terminal.live()) {
             int full = (int) Math.round(share * BAR);

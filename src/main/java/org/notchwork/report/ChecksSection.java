@@ -21,11 +21,11 @@ final class ChecksSection {
         calibration(flow);
         flow.heading("Cross-checks");
         Table table = new Table(List.of(
-                Table.Column.left("check", 15),
+                Table.Column.left("check", 18),
                 Table.Column.left("on", 24),
-                Table.Column.right("compared", 10),
+                Table.Column.right("compared", 12),
                 Table.Column.left("expected", 40),
-                Table.Column.left("observed", 32),
+                Table.Column.left("observed", 28),
                 Table.Column.left("outcome", 12)));
         results.checks().stream()
                 .filter(c -> c.kind() != CheckKind.THEORY_MEAN || c.outcome() == CheckOutcome.DIFFERS)
