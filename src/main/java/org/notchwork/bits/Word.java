@@ -11,6 +11,9 @@ import java.util.Objects;
  */
 public record Word(int width, BigInteger value) {
 
+    /** A number of so many hexadecimal digits is below 2^63. */
+    private static final int LONG_DIGITS = 15;
+
     /** Checks that the value fits the width. */
     public Word {
         Objects.requireNonNull(value);
@@ -39,12 +42,14 @@ public record Word(int width, BigInteger value) {
             throw new IllegalArgumentException(
                     "a word of " + width + " bits is written with " + digits(width) + " digits 0-9a-f");
         }
-        return new Word(width, new BigInteger(hex, 16));
+        return hex.length() <= LONG_DIGITS
+                ? of(width, Long.parseLong(hex, 16))
+                : new Word(width, new BigInteger(hex, 16));
     }
 
     /** Returns the word as ⌈width / 4⌉ lower-case hexadecimal digits. */
     public String hex() {
-        String digits = value.toString(16);
+        String digits = width < Long.SIZE ? Long.toHexString(value.longValue()) : value.toString(16);
         return "0".repeat(digits(width) - digits.length()) + digits;
     }
 
@@ -77,6 +82,12 @@ public record Word(int width, BigInteger value) {
     }
 
     private static boolean isLowerHex(String text) {
-        return text.chars().allMatch(c -> (c >= '0' && c <= '9') || (c >= 'a' && c <= 'f'));
+        for (int i = 0; i < text.length(); i++) {
+            char c = text.charAt(i);
+            if (!(c >= '0' && c <= '9') && !(c >= 'a' && c <= 'f')) {
+                return false;
+            }
+        }
+        return true;
     }
 }

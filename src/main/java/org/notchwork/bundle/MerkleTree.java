@@ -16,7 +16,8 @@ public final class MerkleTree {
 
     /** Adds an entry. */
     public void add(byte[] entry) {
-        addLeaf(leaf(entry));
+        digest.update((byte) 0);
+        addLeaf(digest.digest(entry));
     }
 
     /** Adds an entry whose leaf hash is known: 32 bytes. */
