@@ -1,35 +1,36 @@
 package org.notchwork;
 
+import static com.tngtech.archunit.base.DescribedPredicate.not;
+import static com.tngtech.archunit.core.domain.JavaClass.Predicates.resideInAPackage;
 import static com.tngtech.archunit.core.domain.JavaClass.Predicates.resideInAnyPackage;
-import static com.tngtech.archunit.lang.syntax.ArchRuleDefinition.fields;
+import static com.tngtech.archunit.core.domain.JavaClass.Predicates.resideOutsideOfPackages;
+import static com.tngtech.archunit.core.domain.JavaClass.Predicates.type;
 import static com.tngtech.archunit.lang.syntax.ArchRuleDefinition.noClasses;
 import static com.tngtech.archunit.library.dependencies.SlicesRuleDefinition.slices;
 
 import com.tngtech.archunit.base.DescribedPredicate;
+import com.tngtech.archunit.core.domain.JavaAccess;
 import com.tngtech.archunit.core.domain.JavaClass;
 import com.tngtech.archunit.core.domain.JavaClasses;
 import com.tngtech.archunit.core.importer.ClassFileImporter;
 import com.tngtech.archunit.core.importer.ImportOption;
-import java.time.Clock;
-import java.time.Instant;
-import java.time.LocalDate;
-import java.time.LocalDateTime;
-import java.time.ZonedDateTime;
 import java.util.List;
-import java.util.Random;
-import java.util.concurrent.ThreadLocalRandom;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.DynamicTest;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.TestFactory;
 import org.notchwork.engine.BlindEngine;
 import org.notchwork.engine.SightedEngine;
+import org.notchwork.engine.Simulation;
 import org.notchwork.problem.Answer;
+import org.notchwork.problem.BitFunction;
 import org.notchwork.problem.Instance;
+import org.notchwork.problem.Meter;
+import org.notchwork.problem.Problem;
 import org.notchwork.problem.Unitary;
 import org.notchwork.seed.SeedTree;
 
-/** The rules of the house, each named in words. */
+/** The rules of the house about who may use what, each named in words. */
 class ArchitectureTest {
 
     private static final String ROOT = "org.notchwork.";
@@ -90,6 +91,18 @@ class ArchitectureTest {
     @Test
     void packagesHaveNoCycles() {
         slices().matching("org.notchwork.(*)..").should().beFreeOfCycles().check(HOUSE);
+        slices().matching("org.notchwork.(**)").should().beFreeOfCycles().check(HOUSE);
+    }
+
+    @Test
+    void aLawUsesExactNumbersAndNothingElseOfTheHouse() {
+        noClasses()
+                .that()
+                .resideInAPackage("org.notchwork.law..")
+                .should()
+                .dependOnClassesThat(resideInAPackage("org.notchwork..")
+                        .and(resideOutsideOfPackages("org.notchwork.law..", "org.notchwork.exact..")))
+                .check(HOUSE);
     }
 
     @Test
@@ -110,6 +123,16 @@ class ArchitectureTest {
     }
 
     @Test
+    void noEngineDrawsAnInstanceOrListsWhatMayBeHidden() {
+        noClasses()
+                .that()
+                .resideInAPackage("org.notchwork.engine..")
+                .should()
+                .accessTargetWhere(method(Problem.class, "draw", "drawHiding", "answers"))
+                .check(HOUSE);
+    }
+
+    @Test
     void aBlindEngineIsNotSightedAtTheSameTime() {
         noClasses()
                 .that()
@@ -120,13 +143,36 @@ class ArchitectureTest {
     }
 
     @Test
-    void aStrategyGetsNoInstanceNoUnitaryNoSeedAndNoEngine() {
+    void aStrategyGetsNoInstanceNoUnitaryNoMeterNoBareFunctionAndNoSeed() {
         noClasses()
                 .that()
                 .resideInAPackage("org.notchwork.strategy..")
                 .should()
                 .dependOnClassesThat()
-                .belongToAnyOf(Instance.class, Unitary.class, SeedTree.class, BlindEngine.class, SightedEngine.class)
+                .belongToAnyOf(Instance.class, Unitary.class, Meter.class, BitFunction.class, SeedTree.class)
+                .check(HOUSE);
+    }
+
+    @Test
+    void aStrategyKnowsOfEnginesOnlyTheOpenedSimulation() {
+        noClasses()
+                .that()
+                .resideInAPackage("org.notchwork.strategy..")
+                .should()
+                .dependOnClassesThat(resideInAPackage("org.notchwork.engine..").and(not(type(Simulation.class))))
+                .check(HOUSE);
+    }
+
+    /** The listed outcomes are for cross-checks: they are not counted, and they give the answer away. */
+    @Test
+    void aStrategyNeverReadsAnUncountedDistributionOrDrawsInstances() {
+        noClasses()
+                .that()
+                .resideInAPackage("org.notchwork.strategy..")
+                .should()
+                .accessTargetWhere(method(Simulation.class, "outcomes"))
+                .orShould()
+                .accessTargetWhere(method(Problem.class, "draw", "drawHiding", "answers"))
                 .check(HOUSE);
     }
 
@@ -141,67 +187,11 @@ class ArchitectureTest {
                 .check(HOUSE);
     }
 
-    @Test
-    void chanceComesFromTheSeedTreeAlone() {
-        noClasses()
-                .that()
-                .resideOutsideOfPackage("org.notchwork.seed..")
-                .should()
-                .dependOnClassesThat()
-                .resideInAnyPackage("org.apache.commons.rng..")
-                .check(HOUSE);
-        noClasses()
-                .should()
-                .dependOnClassesThat()
-                .belongToAnyOf(Random.class, ThreadLocalRandom.class)
-                .orShould()
-                .callMethod(Math.class, "random")
-                .check(HOUSE);
-    }
-
-    @Test
-    void theClockIsReadOnTheCommandLineOnly() {
-        noClasses()
-                .that()
-                .resideOutsideOfPackage("org.notchwork.cli..")
-                .should()
-                .callMethod(System.class, "currentTimeMillis")
-                .orShould()
-                .callMethod(System.class, "nanoTime")
-                .orShould()
-                .callMethod(Instant.class, "now")
-                .orShould()
-                .callMethod(LocalDate.class, "now")
-                .orShould()
-                .callMethod(LocalDateTime.class, "now")
-                .orShould()
-                .callMethod(ZonedDateTime.class, "now")
-                .orShould()
-                .dependOnClassesThat()
-                .areAssignableTo(Clock.class)
-                .check(HOUSE);
-    }
-
-    @Test
-    void nothingDependsOnTheMachinesLocaleOrCharset() {
-        noClasses()
-                .should()
-                .callMethod(String.class, "format", String.class, Object[].class)
-                .orShould()
-                .callMethod(String.class, "formatted", Object[].class)
-                .orShould()
-                .callMethod(String.class, "toLowerCase")
-                .orShould()
-                .callMethod(String.class, "toUpperCase")
-                .orShould()
-                .callMethod(String.class, "getBytes")
-                .orShould()
-                .callConstructor(String.class, byte[].class)
-                .check(HOUSE);
-    }
-
-    @Test
-    void thereIsNoMutableStaticState() {
-        fields().that().areStatic().should().beFinal().check(HOUSE);
+    /** Calls and method references alike. */
+    private static DescribedPredicate<JavaAccess<?>> method(Class<?> owner, String... names) {
+        return DescribedPredicate.describe(
+                owner.getSimpleName() + "." + String.join("/", names),
+                access -> access.getTargetOwner().isAssignableTo(owner)
+                        && List.of(names).contains(access.getTarget().getName()));
     }
 }

@@ -22,6 +22,9 @@ public final class FibreEngine implements BlindEngine {
 
     private static final int WIDTH = 26;
 
+    /** A value and a point share one word when the fibres are sorted. */
+    private static final int VALUE_WIDTH = 31;
+
     @Override
     public String name() {
         return NAME;
@@ -46,8 +49,17 @@ public final class FibreEngine implements BlindEngine {
         return 8L << width;
     }
 
+    /**
+     * Prepares to run circuits around one function.
+     *
+     * @throws IllegalArgumentException if the input register has more than 26 qubits or the value register more than 31
+     */
     @Override
     public Simulation open(Unitary unitary) {
+        if (unitary.width() > WIDTH || unitary.valueWidth() > VALUE_WIDTH) {
+            throw new IllegalArgumentException("fibre reaches width " + WIDTH + " with values of " + VALUE_WIDTH
+                    + " bits, not width " + unitary.width() + " with " + unitary.valueWidth());
+        }
         return new Opened(unitary);
     }
 

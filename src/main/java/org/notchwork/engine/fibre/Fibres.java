@@ -7,7 +7,7 @@ import org.notchwork.problem.Unitary;
  * All points of the domain, grouped by value: found by evaluating the function everywhere, without any promise.
  *
  * <p>Each entry holds a value in its high half and a point in its low half, sorted, so that a fibre is a run of
- * entries. Widths and values of at most 26 bits.
+ * entries. Points of at most 26 bits, values of at most 31.
  */
 final class Fibres {
 

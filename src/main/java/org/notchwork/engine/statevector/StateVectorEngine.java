@@ -31,10 +31,13 @@ public final class StateVectorEngine implements BlindEngine {
 
     @Override
     public Optional<String> refusal(Problem problem, int width) {
-        return 2 * width <= QUBITS
-                ? Optional.empty()
-                : Optional.of("statevector holds " + QUBITS + " qubits and width " + width + " needs " + 2 * width
-                        + "; engine fibre reaches width 26");
+        if (2 * width <= QUBITS) {
+            return Optional.empty();
+        }
+        String other =
+                width <= 26 ? "engine fibre reaches width 26" : "engine annihilator reaches width 63 but is sighted";
+        return Optional.of(
+                "statevector holds " + QUBITS + " qubits and width " + width + " needs " + 2 * width + "; " + other);
     }
 
     @Override
@@ -42,8 +45,17 @@ public final class StateVectorEngine implements BlindEngine {
         return (4L << (2 * width)) + (16L << width);
     }
 
+    /**
+     * Prepares to run circuits around one function.
+     *
+     * @throws IllegalArgumentException if both registers together have more than 26 qubits
+     */
     @Override
     public Simulation open(Unitary unitary) {
+        int qubits = unitary.width() + unitary.valueWidth();
+        if (qubits > QUBITS) {
+            throw new IllegalArgumentException("statevector holds " + QUBITS + " qubits, not " + qubits);
+        }
         return new Opened(unitary);
     }
 

@@ -13,8 +13,12 @@ import org.notchwork.seed.RandomStream;
 /**
  * Find s ≠ 0 where f(x) = f(y) exactly if y ∈ {x, x ⊕ s} (D. R. Simon, SIAM J. Comput. 26 (1997), section 3).
  *
- * <p>An instance is drawn so: s = {@code nonZeroBits(n)}, uniform over the non-zero words; then the labels, either a
- * uniformly random injective table or a keyed permutation of the coset's representative.
+ * <p>An instance is drawn from its stream in this order, which is a rule of the format. First s =
+ * {@code nonZeroBits(n)}, uniform over the non-zero words; {@link #drawHiding} is given s and takes no word for it.
+ * With h = ⌊log₂ s⌋ the coset {x, x ⊕ s} is represented by its member r whose bit h is clear. Then the labels. Table:
+ * {@code distinct(2^(n−1), 2^n)} in the order of the draws goes to the representatives in increasing order, and f(x)
+ * is the label of x's coset. Permutation: π is drawn as {@link org.notchwork.seed.KeyedPermutation} says, and
+ * f(x) = π(r).
  *
  * @param labelling how the values are drawn
  */

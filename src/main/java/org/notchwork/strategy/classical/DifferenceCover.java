@@ -30,7 +30,8 @@ public final class DifferenceCover implements PeriodByCollision {
 
     @Override
     public long memoryBytes(int width, long queryLimit) {
-        return Math.min(PeriodByCollision.super.memoryBytes(width, queryLimit), (SLOT_BYTES * 4) << (width / 2 + 2));
+        long points = (1L << (width / 2)) + (1L << (width - width / 2)) - 1;
+        return SeenValues.bytes(Math.min(queryLimit, points));
     }
 
     @Override

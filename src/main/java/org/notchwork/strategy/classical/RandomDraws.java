@@ -26,6 +26,12 @@ public final class RandomDraws implements PeriodByCollision {
         return false;
     }
 
+    /** The points asked are held in a table of their own beside the values seen. */
+    @Override
+    public long memoryBytes(int width, long queryLimit) {
+        return Math.multiplyExact(2L, PeriodByCollision.super.memoryBytes(width, queryLimit));
+    }
+
     @Override
     public Attempt attempt(Oracle oracle, RandomStream stream) {
         return CollisionSearch.run(oracle, new Fresh(oracle.width(), stream));

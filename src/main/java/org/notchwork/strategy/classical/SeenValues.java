@@ -12,8 +12,12 @@ final class SeenValues {
 
     private static final long GOLDEN = 0x9E3779B97F4A7C15L;
 
-    private long[] values = new long[16];
-    private long[] points = new long[16];
+    private static final int LEAST = 16;
+
+    private static final long SLOT_BYTES = 16;
+
+    private long[] values = new long[LEAST];
+    private long[] points = new long[LEAST];
     private int size;
 
     /**
@@ -38,6 +42,14 @@ final class SeenValues {
     /** Returns how many words of memory the slots take. */
     long memoryWords() {
         return 2L * values.length;
+    }
+
+    /**
+     * Returns how many bytes a table takes at most while it takes up this many values: its slots of 16 bytes, fewer
+     * than 10/3 a value, and half as many of the table it grew from.
+     */
+    static long bytes(long entries) {
+        return Math.addExact(SLOT_BYTES * LEAST, Math.multiplyExact(Math.min(entries, Long.MAX_VALUE / 256), 80L));
     }
 
     private static int slot(long value, long[] table) {
