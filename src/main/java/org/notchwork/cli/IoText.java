@@ -17,7 +17,7 @@ final class IoText {
             return Printable.escape(denied.getFile() + ": permission denied; name a folder that may be written");
         }
         if (fault instanceof NoSuchFileException missing) {
-            return Printable.escape(missing.getFile() + ": not there (any more)");
+            return Printable.escape(missing.getFile() + ": not there, or its folder cannot be written");
         }
         if (fault instanceof FileSystemException system) {
             String reason = system.getReason() == null ? "cannot be used" : system.getReason();
