@@ -14,30 +14,40 @@ import java.util.regex.Pattern;
  *
  * <p>A member that is absent or wrong is noted and answered with a harmless stand-in, so that one pass finds all
  * faults of a document; a caller must not use what it built once {@link #faults} is not empty. Members that nobody
- * asked for are faults as well, noted by {@link #end}.
+ * asked for are faults as well, noted by {@link #end}. The characters of a string are counted as Unicode code points, as
+ * a JSON Schema counts them.
  */
 public final class Fields {
 
     private static final int SHOWN = 60;
+    private static final int MOST_UNKNOWN = 20;
+
+    /** Control characters, and the two separators that end a line as well. */
+    private static final Pattern SEVERAL_LINES = Pattern.compile("[\\p{Cc}\\u2028\\u2029]");
 
     private final JsonObject object;
+    private final boolean standIn;
     private final String pointer;
     private final List<Fault> faults;
     private final Set<String> known = new TreeSet<>();
 
-    private Fields(JsonObject object, String pointer, List<Fault> faults) {
-        this.object = object;
+    private Fields(Optional<JsonObject> object, String pointer, List<Fault> faults) {
+        this.object = object.orElseGet(() -> new JsonObject(Collections.emptyMap()));
+        this.standIn = object.isEmpty();
         this.pointer = pointer;
         this.faults = faults;
     }
 
-    /** Opens a value that should be an object; if it is not, that is noted and an empty object stands in. */
+    /**
+     * Opens a value that should be an object; if it is not, that is noted and an empty object stands in, whose members
+     * nobody is told to be missing.
+     */
     public static Fields of(JsonValue value, String pointer, List<Fault> faults) {
         if (value instanceof JsonObject object) {
-            return new Fields(object, pointer, faults);
+            return new Fields(Optional.of(object), pointer, faults);
         }
         faults.add(new Fault(pointer, "this is " + value.kind(), "an object is wanted"));
-        return new Fields(new JsonObject(Collections.emptyMap()), pointer, faults);
+        return new Fields(Optional.empty(), pointer, faults);
     }
 
     /** Returns where this object stands: an RFC 6901 pointer. */
@@ -48,6 +58,11 @@ public final class Fields {
     /** Returns the pointer of a member. */
     public String pointer(String name) {
         return Fault.step(pointer, name);
+    }
+
+    /** Returns whether this stands in for an object that is missing or something else, which is noted already. */
+    public boolean isStandIn() {
+        return standIn;
     }
 
     /** Returns the list that faults are added to, shared by all parts of one document. */
@@ -69,6 +84,16 @@ public final class Fields {
     /** Returns a required string of {@code min} to {@code max} characters. */
     public String text(String name, int min, int max) {
         return required(name, "a string").map(v -> text(name, v, min, max)).orElse("");
+    }
+
+    /** Returns a required string of {@code min} to {@code max} characters in one line: no control characters. */
+    public String line(String name, int min, int max) {
+        String text = text(name, min, max);
+        if (SEVERAL_LINES.matcher(text).find()) {
+            fault(name, "a string with a line break or another control character", "one line is wanted");
+            return "";
+        }
+        return text;
     }
 
     /** Returns an optional string of {@code min} to {@code max} characters. */
@@ -121,7 +146,9 @@ public final class Fields {
 
     /** Returns a required member that is an object. */
     public Fields object(String name) {
-        return of(required(name, "an object").orElse(new JsonObject(Collections.emptyMap())), pointer(name), faults);
+        return required(name, "an object")
+                .map(v -> of(v, pointer(name), faults))
+                .orElseGet(() -> new Fields(Optional.empty(), pointer(name), faults));
     }
 
     /** Returns an optional member that is an object. */
@@ -129,7 +156,10 @@ public final class Fields {
         return optional(name).map(v -> of(v, pointer(name), faults));
     }
 
-    /** Returns the items of a required array of {@code min} to {@code max} items, each with its own pointer. */
+    /**
+     * Returns the items of a required array of {@code min} to {@code max} items, each with its own pointer; of a longer
+     * array the first {@code max}.
+     */
     public List<Item> items(String name, int min, int max) {
         return required(name, "an array").map(v -> items(name, v, min, max)).orElse(List.of());
     }
@@ -139,24 +169,33 @@ public final class Fields {
         return optional(name).map(v -> items(name, v, min, max));
     }
 
-    /** Notes every member that nobody asked for, with the nearest known name where one is near. */
+    /**
+     * Notes every member that nobody asked for, with the nearest known name where one is near.
+     *
+     * <p>The first 20 are noted one by one and the others by their number, so that a hostile file cannot make a
+     * message longer than itself.
+     */
     public void end() {
-        for (String name : object.members().keySet()) {
-            if (!known.contains(name)) {
-                faults.add(new Fault(pointer(name), "unknown member " + quoted(name), Spelling.mend(name, known)));
-            }
+        List<String> unknown = object.members().keySet().stream()
+                .filter(name -> !known.contains(name))
+                .toList();
+        for (String name : unknown.subList(0, Math.min(unknown.size(), MOST_UNKNOWN))) {
+            faults.add(new Fault(pointer(name), "unknown member " + quoted(name), Spelling.mend(name, known)));
+        }
+        int more = unknown.size() - MOST_UNKNOWN;
+        if (more > 0) {
+            String members = more == 1 ? " more unknown member" : " more unknown members";
+            faults.add(new Fault(pointer, more + members, "known here: " + String.join(", ", known)));
         }
     }
 
     /** Returns a text as a message shows it: quoted, cut to a readable length. */
     public static String quoted(String text) {
-        String shown = text.length() <= SHOWN ? text : text.substring(0, SHOWN) + "…";
-        return CanonicalJson.text(new JsonText(shown));
+        return CanonicalJson.text(new JsonText(Printable.cut(text, SHOWN)));
     }
 
     private static String shown(JsonValue value) {
-        String text = CanonicalJson.text(value);
-        return text.length() <= SHOWN ? text : text.substring(0, SHOWN) + "…";
+        return Printable.cut(CanonicalJson.text(value), SHOWN);
     }
 
     private Optional<JsonValue> optional(String name) {
@@ -166,21 +205,21 @@ public final class Fields {
 
     private Optional<JsonValue> required(String name, String wanted) {
         Optional<JsonValue> value = optional(name);
-        if (value.isEmpty()) {
+        if (value.isEmpty() && !standIn) {
             faults.add(new Fault(pointer(name), "this member is missing", wanted + " is wanted"));
         }
         return value;
     }
 
     private String text(String name, JsonValue value, int min, int max) {
-        if (value instanceof JsonText text
-                && text.value().length() >= min
-                && text.value().length() <= max) {
-            return text.value();
+        String wrong = "this is " + value.kind();
+        if (value instanceof JsonText text) {
+            int length = text.value().codePointCount(0, text.value().length());
+            if (length >= min && length <= max) {
+                return text.value();
+            }
+            wrong = "a string of " + length + (length == 1 ? " character" : " characters");
         }
-        String wrong = value instanceof JsonText text
-                ? "a string of " + text.value().length() + " characters"
-                : "this is " + value.kind();
         faults.add(new Fault(pointer(name), wrong, "a string of " + min + " to " + max + " characters is wanted"));
         return "";
     }
@@ -211,10 +250,11 @@ public final class Fields {
         int size = array.items().size();
         if (size < min || size > max) {
             String wrong = size == 0 ? "an empty list" : "a list of " + size;
-            faults.add(new Fault(pointer(name), wrong, min + " to " + max + " items are wanted"));
+            String range = min == max ? Integer.toString(min) : min + " to " + max;
+            faults.add(new Fault(pointer(name), wrong, range + " items are wanted"));
         }
         List<Item> items = new ArrayList<>();
-        for (int i = 0; i < size; i++) {
+        for (int i = 0; i < Math.min(size, max); i++) {
             items.add(new Item(array.items().get(i), Fault.step(pointer(name), Integer.toString(i))));
         }
         return List.copyOf(items);

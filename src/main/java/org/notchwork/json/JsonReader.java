@@ -24,20 +24,25 @@ import tools.jackson.core.json.JsonFactory;
  */
 public final class JsonReader {
 
-    private static final int LONGEST_NUMBER = 40;
+    private static final int LONGEST_NUMBER = "-9007199254740991".length();
 
     private final JsonLimits limits;
     private final JsonFactory factory;
 
-    /** Creates a reader with these limits; it may be shared between threads. */
+    /**
+     * Creates a reader with these limits; it may be shared between threads.
+     *
+     * <p>The tokenizer is allowed one level more than this reader and numbers of any length, which it does not convert,
+     * so that this reader sees them first and can name their place.
+     */
     public JsonReader(JsonLimits limits) {
         this.limits = limits;
         this.factory = JsonFactory.builder()
                 .streamReadConstraints(StreamReadConstraints.builder()
-                        .maxNestingDepth(limits.depth())
+                        .maxNestingDepth(limits.depth() + 1)
                         .maxStringLength(limits.text())
                         .maxNameLength(limits.text())
-                        .maxNumberLength(LONGEST_NUMBER)
+                        .maxNumberLength(limits.bytes())
                         .build())
                 .build();
     }
@@ -51,21 +56,17 @@ public final class JsonReader {
      */
     public JsonValue read(byte[] document) throws JsonFault {
         if (document.length > limits.bytes()) {
-            throw new JsonFault("byte " + limits.bytes(), "longer than the limit of " + limits.bytes() + " bytes");
+            throw new JsonFault(
+                    "byte " + limits.bytes(),
+                    "the document goes on",
+                    "at most " + limits.bytes() + " bytes are wanted");
         }
         String text = Utf8.decode(document);
         if (text.isBlank()) {
-            throw new JsonFault("line 1, column 1", "the document is empty");
+            throw new JsonFault("line 1, column 1", "the document is empty", "a JSON document is wanted");
         }
         try (JsonParser parser = factory.createParser(ObjectReadContext.empty(), text)) {
-            parser.nextToken();
-            JsonValue value = value(parser);
-            if (parser.nextToken() != null) {
-                throw fault(parser, "something follows the end of the document");
-            }
-            return value;
-        } catch (JacksonException e) {
-            throw new JsonFault(place(e.getLocation()), plain(e));
+            return document(parser);
         }
     }
 
@@ -81,45 +82,61 @@ public final class JsonReader {
         byte[] canonical = CanonicalJson.bytes(value);
         int difference = Arrays.mismatch(document, canonical);
         if (difference >= 0) {
-            throw new JsonFault("byte " + difference, "not in canonical form (RFC 8785) from here on");
+            throw new JsonFault("byte " + difference, "not in canonical form", "RFC 8785 is wanted from here on");
         }
         return value;
     }
 
-    private JsonValue value(JsonParser parser) throws JsonFault {
+    private JsonValue document(JsonParser parser) throws JsonFault {
+        try {
+            parser.nextToken();
+            JsonValue value = value(parser, 1);
+            if (parser.nextToken() != null) {
+                throw fault(parser, "something follows the end of the document", "one document a file is wanted");
+            }
+            return value;
+        } catch (JacksonException e) {
+            throw plain(parser, e);
+        }
+    }
+
+    /** Reads the value at the current token; {@code level} is its level of nesting if it is an array or an object. */
+    private JsonValue value(JsonParser parser, int level) throws JsonFault {
         JsonToken token = parser.currentToken();
         return switch (token) {
-            case START_OBJECT -> object(parser);
-            case START_ARRAY -> array(parser);
+            case START_OBJECT -> object(parser, level);
+            case START_ARRAY -> array(parser, level);
             case VALUE_STRING -> text(parser);
             case VALUE_NUMBER_INT -> integer(parser);
             case VALUE_NUMBER_FLOAT ->
-                throw fault(parser, "a number with a fraction or an exponent; write it as a string");
+                throw fault(parser, "a number with a fraction or an exponent", "write it as a string");
             case VALUE_TRUE -> new JsonBoolean(true);
             case VALUE_FALSE -> new JsonBoolean(false);
-            case VALUE_NULL -> throw fault(parser, "null is not used; leave the member out");
+            case VALUE_NULL -> throw fault(parser, "null is not used", "leave the member out");
             case END_OBJECT, END_ARRAY, PROPERTY_NAME, NOT_AVAILABLE, VALUE_EMBEDDED_OBJECT ->
-                throw fault(parser, "a value is missing");
+                throw fault(parser, "a value is missing", "a value is wanted");
         };
     }
 
-    private JsonObject object(JsonParser parser) throws JsonFault {
+    private JsonObject object(JsonParser parser, int level) throws JsonFault {
+        checkLevel(parser, level);
         TreeMap<String, JsonValue> members = new TreeMap<>();
         while (parser.nextToken() == JsonToken.PROPERTY_NAME) {
             String name = checked(parser, parser.currentName());
             if (members.containsKey(name)) {
-                throw fault(parser, "a second member " + Fields.quoted(name) + "; names must differ");
+                throw fault(parser, "a second member " + Fields.quoted(name), "names must differ");
             }
             parser.nextToken();
-            members.put(name, value(parser));
+            members.put(name, value(parser, level + 1));
         }
         return new JsonObject(members);
     }
 
-    private JsonArray array(JsonParser parser) throws JsonFault {
+    private JsonArray array(JsonParser parser, int level) throws JsonFault {
+        checkLevel(parser, level);
         List<JsonValue> items = new ArrayList<>();
         while (parser.nextToken() != JsonToken.END_ARRAY) {
-            items.add(value(parser));
+            items.add(value(parser, level + 1));
         }
         return new JsonArray(items);
     }
@@ -131,10 +148,10 @@ public final class JsonReader {
     private static JsonInteger integer(JsonParser parser) throws JsonFault {
         String digits = parser.getString();
         if (digits.equals("-0")) {
-            throw fault(parser, "-0 is not a whole number here; write 0");
+            throw fault(parser, "-0 is not a whole number here", "write 0");
         }
-        if (digits.length() > 17 || Math.abs(Long.parseLong(digits)) > JsonInteger.MAX) {
-            throw fault(parser, "a whole number beyond 2^53 - 1 in magnitude; write it as a string");
+        if (digits.length() > LONGEST_NUMBER || Math.abs(Long.parseLong(digits)) > JsonInteger.MAX) {
+            throw fault(parser, "a whole number beyond 2^53 - 1 in magnitude", "write it as a string");
         }
         return new JsonInteger(Long.parseLong(digits));
     }
@@ -145,32 +162,39 @@ public final class JsonReader {
             if (Character.isHighSurrogate(c) && i + 1 < text.length() && Character.isLowSurrogate(text.charAt(i + 1))) {
                 i++;
             } else if (Character.isSurrogate(c)) {
-                throw fault(parser, "a lone surrogate, which is not a character");
+                throw fault(parser, "a lone surrogate, which is not a character", "a whole character is wanted");
             }
         }
         return text;
     }
 
-    private static JsonFault fault(JsonParser parser, String what) {
-        return new JsonFault(place(parser.currentTokenLocation()), what);
+    private void checkLevel(JsonParser parser, int level) throws JsonFault {
+        if (level > limits.depth()) {
+            throw fault(parser, "nested too deep", "at most " + limits.depth() + " levels are wanted");
+        }
     }
 
-    /** Returns where a fault is; the tokenizer does not know where a limit was exceeded. */
+    private static JsonFault fault(JsonParser parser, String wrong, String mend) {
+        return new JsonFault(place(parser.currentTokenLocation()), wrong, mend);
+    }
+
     private static String place(TokenStreamLocation location) {
-        return location == null
-                ? "somewhere"
-                : "line " + Math.max(1, location.getLineNr()) + ", column " + Math.max(1, location.getColumnNr());
+        return "line " + Math.max(1, location.getLineNr()) + ", column " + Math.max(1, location.getColumnNr());
     }
 
     /** Returns what the tokenizer found wrong, in this project's words. */
-    private String plain(JacksonException fault) {
-        if (fault instanceof StreamConstraintsException) {
-            return "nested deeper than " + limits.depth() + " levels, a text longer than " + limits.text()
-                    + " characters, or a number longer than " + LONGEST_NUMBER;
+    private JsonFault plain(JsonParser parser, JacksonException found) {
+        String place = place(found.getLocation() == null ? parser.currentLocation() : found.getLocation());
+        if (found instanceof StreamConstraintsException) {
+            return new JsonFault(
+                    place,
+                    "a string, a name or a number is too long",
+                    "at most " + limits.text() + " characters are wanted");
         }
-        if (fault instanceof UnexpectedEndOfInputException) {
-            return "the document ends too early";
+        if (found instanceof UnexpectedEndOfInputException) {
+            return new JsonFault(place, "the document ends too early", "the rest of it is wanted");
         }
-        return "this is not JSON; a comma, a bracket, a quotation mark or a value is wrong here";
+        return new JsonFault(
+                place, "this is not JSON", "a comma, a bracket, a quotation mark or a value is wrong or missing here");
     }
 }

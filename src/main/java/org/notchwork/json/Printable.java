@@ -23,6 +23,13 @@ public final class Printable {
         return out.toString();
     }
 
+    /** Returns the text, or if it is longer its first {@code most} characters (code points) and an ellipsis. */
+    public static String cut(String text, int most) {
+        return text.codePointCount(0, text.length()) <= most
+                ? text
+                : text.substring(0, text.offsetByCodePoints(0, most)) + "…";
+    }
+
     private static boolean isPlain(int c) {
         return switch (Character.getType(c)) {
             case Character.CONTROL,

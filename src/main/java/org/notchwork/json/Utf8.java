@@ -26,12 +26,12 @@ final class Utf8 {
         CharBuffer out = CharBuffer.allocate(bytes.length);
         CoderResult result = decoder.decode(in, out, true);
         if (result.isError()) {
-            throw new JsonFault("byte " + in.position(), "not UTF-8");
+            throw new JsonFault("byte " + in.position(), "not UTF-8", "save the file as UTF-8");
         }
         decoder.flush(out);
         out.flip();
         if (out.length() > 0 && out.charAt(0) == '\uFEFF') {
-            throw new JsonFault("byte 0", "a byte-order mark; save the file as UTF-8 without one");
+            throw new JsonFault("byte 0", "a byte-order mark", "save the file as UTF-8 without one");
         }
         return out.toString();
     }

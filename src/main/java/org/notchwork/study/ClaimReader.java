@@ -3,7 +3,6 @@ package org.notchwork.study;
 import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.Arrays;
-import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import org.notchwork.exact.Decimals;
@@ -15,24 +14,22 @@ import org.notchwork.json.Spelling;
 final class ClaimReader {
 
     private static final int LONGEST_TEXT = 1000;
-    private static final int LONGEST_CELL = 160;
     private static final String DECIMAL_MEND = "a decimal in quotes is wanted, for example \"12.5\"";
 
-    private final Optional<List<Experiment>> experiments;
+    private final NamedCells cells;
 
-    /**
-     * Creates a reader.
-     *
-     * @param experiments the experiments whose cells may be named; empty if they are faulty themselves
-     */
-    ClaimReader(Optional<List<Experiment>> experiments) {
-        this.experiments = experiments;
+    /** Creates a reader of claims about these cells. */
+    ClaimReader(NamedCells cells) {
+        this.cells = cells;
     }
 
-    /** Returns the claim; empty if faults were noted. */
-    Optional<Claim> read(Fields fields) {
+    /** Returns the claim; empty if faults were noted, or it is about a cell of a faulty experiment. */
+    Optional<Claim> read(Fields fields, Ids ids) {
+        if (fields.isStandIn()) {
+            return Optional.empty();
+        }
         int before = fields.faults().size();
-        String id = fields.text("id", ExperimentReader.ID, ExperimentReader.ID_MEND);
+        String id = ids.read(fields);
         String text = fields.text("text", 1, LONGEST_TEXT);
         Optional<Quantity> quantity = quantity(fields);
         Optional<Bound> bound = bound(fields);
@@ -44,7 +41,8 @@ final class ClaimReader {
     }
 
     private Optional<Quantity> quantity(Fields fields) {
-        boolean ofCell = fields.has("figure") || fields.has("cell");
+        boolean hasFigure = fields.has("figure");
+        boolean ofCell = fields.has("cell") || hasFigure;
         boolean ofRatio = fields.has("ratio");
         if (ofCell == ofRatio) {
             fields.faults()
@@ -52,8 +50,6 @@ final class ClaimReader {
                             fields.pointer(),
                             ofCell ? "a claim about a cell and a ratio at once" : "a claim about nothing",
                             "either \"figure\" and \"cell\", or \"ratio\" is wanted"));
-            fields.optionalText("figure", 1, LONGEST_CELL);
-            fields.optionalText("cell", 1, LONGEST_CELL);
             return Optional.empty();
         }
         return ofCell ? figure(fields) : ratio(fields.object("ratio"));
@@ -67,15 +63,15 @@ final class ClaimReader {
                     Arrays.stream(FigureKind.values()).map(FigureKind::word).toList();
             fields.fault("figure", "no figure " + Fields.quoted(word), Spelling.mend(word, words));
         }
-        Optional<Cell> cell = cell(fields, "cell");
+        Optional<Cell> cell = cells.read(fields, "cell");
         return kind.isPresent() && cell.isPresent()
                 ? Optional.of(new Quantity.OfCell(cell.get(), kind.get()))
                 : Optional.empty();
     }
 
     private Optional<Quantity> ratio(Fields fields) {
-        Optional<Cell> of = cell(fields, "of");
-        Optional<Cell> to = cell(fields, "to");
+        Optional<Cell> of = cells.read(fields, "of");
+        Optional<Cell> to = cells.read(fields, "to");
         fields.end();
         if (of.isEmpty() || to.isEmpty()) {
             return Optional.empty();
@@ -90,41 +86,6 @@ final class ClaimReader {
             return Optional.empty();
         }
         return Optional.of(new Quantity.Ratio(of.get(), to.get()));
-    }
-
-    private Optional<Cell> cell(Fields fields, String name) {
-        String id = fields.text(name, 1, LONGEST_CELL);
-        if (id.isEmpty() || experiments.isEmpty()) {
-            return Optional.empty();
-        }
-        List<Cell> cells = new ArrayList<>();
-        for (Experiment experiment : experiments.get()) {
-            cells.addAll(experiment.cells());
-        }
-        Optional<Cell> cell = cells.stream().filter(c -> c.id().equals(id)).findFirst();
-        if (cell.isEmpty()) {
-            fields.fault(name, "no cell " + Fields.quoted(id), nearest(id, cells));
-        }
-        return cell;
-    }
-
-    private static String nearest(String id, List<Cell> cells) {
-        List<String> ids = cells.stream().map(Cell::id).toList();
-        return Spelling.nearest(id, ids)
-                .map(near -> "did you mean \"" + near + "\"?")
-                .orElseGet(() -> "EXPERIMENT/WIDTH/LABEL is wanted, for example \""
-                        + ids.stream()
-                                .max(Comparator.comparingInt(c -> shared(c, id)))
-                                .orElse("")
-                        + "\"");
-    }
-
-    private static int shared(String a, String b) {
-        int i = 0;
-        while (i < a.length() && i < b.length() && a.charAt(i) == b.charAt(i)) {
-            i++;
-        }
-        return i;
     }
 
     private static Optional<Bound> bound(Fields fields) {

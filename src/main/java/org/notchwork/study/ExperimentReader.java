@@ -3,7 +3,6 @@ package org.notchwork.study;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import java.util.regex.Pattern;
 import org.notchwork.catalogue.Problems;
 import org.notchwork.json.Fields;
 import org.notchwork.json.JsonInteger;
@@ -13,12 +12,6 @@ import org.notchwork.problem.Problem;
 /** Reads one experiment. */
 final class ExperimentReader {
 
-    /** What the id of an experiment or of a claim looks like; it becomes part of a file name. */
-    static final Pattern ID = Pattern.compile("[a-z0-9](?:[a-z0-9-]{0,38}[a-z0-9])?");
-
-    /** What to say when an id does not look so. */
-    static final String ID_MEND = "1 to 40 lower-case letters, digits and inner hyphens are wanted";
-
     private static final int MOST_WIDTHS = 40;
     private static final int MOST_STRATEGIES = 12;
     private static final int MOST_TRIALS = 1_000_000;
@@ -26,19 +19,25 @@ final class ExperimentReader {
 
     private ExperimentReader() {}
 
-    /** Returns the experiment; empty if its problem cannot be known. To be used only if no fault was noted. */
-    static Optional<Experiment> read(Fields fields) {
-        String id = fields.text("id", ID, ID_MEND);
+    /** Reads an experiment; {@code ids} has seen the ids before it. */
+    static ExperimentReading read(Fields fields, Ids ids) {
+        int before = fields.faults().size();
+        String id = ids.read(fields);
         Optional<Problem> problem = problem(fields.object("problem"));
         List<Integer> widths = widths(fields, problem);
         List<StrategyChoice> strategies = strategies(fields, problem, widths);
         int trials = (int) fields.integer("trials", 1, MOST_TRIALS);
         long limit = fields.integer("query-limit", 1, JsonInteger.MAX);
         fields.end();
-        return problem.map(p -> new Experiment(id, p, widths, strategies, trials, limit));
+        boolean sound = fields.faults().size() == before && !fields.isStandIn();
+        return new ExperimentReading(
+                id, problem.filter(p -> sound).map(p -> new Experiment(id, p, widths, strategies, trials, limit)));
     }
 
     private static Optional<Problem> problem(Fields settings) {
+        if (settings.isStandIn()) {
+            return Optional.empty();
+        }
         if (!settings.has("kind")) {
             settings.fault(
                     "kind", "this member is missing", "one of " + String.join(", ", Problems.kinds()) + " is wanted");

@@ -27,7 +27,7 @@ final class StrategyReader {
         Fields fields = item.object();
         int before = fields.faults().size();
         Optional<Strategy> strategy = strategy(fields);
-        Optional<Engine> engine = engine(fields);
+        Optional<Engine> engine = engine(fields, strategy);
         fields.end();
         strategy.ifPresent(s -> fit(fields, s, engine));
         if (fields.faults().size() > before || strategy.isEmpty()) {
@@ -45,7 +45,20 @@ final class StrategyReader {
         return strategy;
     }
 
-    private static Optional<Engine> engine(Fields fields) {
+    /** Returns the engine; one that an unknown strategy names is checked for itself. */
+    private static Optional<Engine> engine(Fields fields, Optional<Strategy> strategy) {
+        boolean classical =
+                strategy.filter(s -> !(s instanceof QuantumStrategy)).isPresent();
+        if (classical && fields.has("engine")) {
+            fields.fault("engine", strategy.get().name() + " is a classical strategy", "leave the engine out");
+            return Optional.empty();
+        }
+        if (strategy.isPresent() && !classical && !fields.has("engine")) {
+            String engines = String.join(", ", Engines.names());
+            String mend = strategy.get().name() + " is a quantum strategy; one of " + engines + " is wanted";
+            fields.fault("engine", "this member is missing", mend);
+            return Optional.empty();
+        }
         Optional<String> name = fields.optionalText("engine", 1, 60).filter(n -> !n.isEmpty());
         Optional<Engine> engine = name.flatMap(Engines::engine);
         if (name.isPresent() && engine.isEmpty()) {
@@ -56,22 +69,11 @@ final class StrategyReader {
     }
 
     private void fit(Fields fields, Strategy strategy, Optional<Engine> engine) {
-        boolean quantum = strategy instanceof QuantumStrategy;
-        if (quantum && !fields.has("engine")) {
-            fields.fault(
-                    "engine",
-                    "this member is missing",
-                    strategy.name() + " is a quantum strategy; one of " + String.join(", ", Engines.names())
-                            + " is wanted");
-        }
-        if (!quantum && fields.has("engine")) {
-            fields.fault("engine", strategy.name() + " is a classical strategy", "leave the engine out");
-        }
         problem.ifPresent(p -> {
             for (int width : widths) {
                 Optional<String> refused = strategy.refusal(p, width);
                 refused.ifPresent(why -> fields.fault("name", why, "another strategy or problem is wanted"));
-                Optional<String> unreachable = quantum ? engine.flatMap(e -> e.refusal(p, width)) : Optional.empty();
+                Optional<String> unreachable = engine.flatMap(e -> e.refusal(p, width));
                 unreachable.ifPresent(
                         why -> fields.fault("engine", why, "a smaller width or another engine is wanted"));
                 if (refused.isPresent() || unreachable.isPresent()) {

@@ -1,10 +1,8 @@
 package org.notchwork.study;
 
 import java.util.ArrayList;
-import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
-import java.util.Set;
 import java.util.regex.Pattern;
 import org.notchwork.json.Fault;
 import org.notchwork.json.Fields;
@@ -40,8 +38,7 @@ public final class StudyReader {
         try {
             return read(new JsonReader(JsonLimits.FILE).read(file));
         } catch (JsonFault e) {
-            return new StudyReading(
-                    Optional.empty(), List.of(new Fault(e.place(), e.getMessage(), "a JSON document is wanted")));
+            return new StudyReading(Optional.empty(), List.of(e.fault()));
         }
     }
 
@@ -50,51 +47,35 @@ public final class StudyReader {
         List<Fault> faults = new ArrayList<>();
         Fields fields = Fields.of(document, "", faults);
         fields.text("format", THIS_FORMAT, "\"" + FORMAT + "\" is wanted; another version needs another program");
-        String title = fields.text("title", 1, LONGEST_TITLE);
+        String title = fields.line("title", 1, LONGEST_TITLE);
         String question = fields.text("question", 1, LONGEST_TEXT);
         String seed = fields.text("seed", Seed.FORM, Seed.MEND);
         int crossCheck = (int) fields.optionalInteger("cross-check-width", 0, GREATEST_CROSS_CHECK)
                 .orElse(USUAL_CROSS_CHECK);
-        List<Experiment> experiments = experiments(fields);
-        boolean sound = faults.isEmpty();
-        List<Claim> claims = claims(fields, sound ? Optional.of(experiments) : Optional.empty());
+        List<ExperimentReading> experiments = experiments(fields);
+        List<Claim> claims = claims(fields, experiments);
         fields.end();
-        return faults.isEmpty()
-                ? new StudyReading(
-                        Optional.of(new Study(title, question, new Seed(seed), experiments, crossCheck, claims)),
-                        List.of())
-                : new StudyReading(Optional.empty(), faults);
+        if (!faults.isEmpty()) {
+            return new StudyReading(Optional.empty(), faults);
+        }
+        List<Experiment> sound =
+                experiments.stream().flatMap(e -> e.experiment().stream()).toList();
+        return new StudyReading(
+                Optional.of(new Study(title, question, new Seed(seed), sound, crossCheck, claims)), List.of());
     }
 
-    private static List<Experiment> experiments(Fields fields) {
-        List<Experiment> experiments = new ArrayList<>();
-        Set<String> ids = new HashSet<>();
-        for (Fields.Item item : fields.items("experiments", 1, MOST_EXPERIMENTS)) {
-            Fields members = item.object();
-            ExperimentReader.read(members).ifPresent(experiment -> {
-                if (!experiment.id().isEmpty() && !ids.add(experiment.id())) {
-                    members.fault("id", "a second experiment " + Fields.quoted(experiment.id()), "ids must differ");
-                }
-                experiments.add(experiment);
-            });
-        }
-        return experiments;
+    private static List<ExperimentReading> experiments(Fields fields) {
+        Ids ids = new Ids("experiment");
+        return fields.items("experiments", 1, MOST_EXPERIMENTS).stream()
+                .map(item -> ExperimentReader.read(item.object(), ids))
+                .toList();
     }
 
-    /** Claims name cells, so they are matched with the experiments only if those are without fault. */
-    private static List<Claim> claims(Fields fields, Optional<List<Experiment>> experiments) {
-        List<Claim> claims = new ArrayList<>();
-        Set<String> ids = new HashSet<>();
-        ClaimReader reader = new ClaimReader(experiments);
-        for (Fields.Item item : fields.optionalItems("claims", 0, MOST_CLAIMS).orElse(List.of())) {
-            Fields members = item.object();
-            reader.read(members).ifPresent(claim -> {
-                if (!claim.id().isEmpty() && !ids.add(claim.id())) {
-                    members.fault("id", "a second claim " + Fields.quoted(claim.id()), "ids must differ");
-                }
-                claims.add(claim);
-            });
-        }
-        return claims;
+    private static List<Claim> claims(Fields fields, List<ExperimentReading> experiments) {
+        Ids ids = new Ids("claim");
+        ClaimReader reader = new ClaimReader(new NamedCells(experiments));
+        return fields.optionalItems("claims", 0, MOST_CLAIMS).orElse(List.of()).stream()
+                .flatMap(item -> reader.read(item.object(), ids).stream())
+                .toList();
     }
 }

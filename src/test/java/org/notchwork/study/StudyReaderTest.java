@@ -168,7 +168,7 @@ class StudyReaderTest {
                         "[\"0.5\", \"1\"]",
                         "[\"1\", \"0.5\"]",
                         "/claims/2/between: 1 is above 0.5; the lower bound goes first"),
-                fault("[\"0.5\", \"1\"]", "[\"0.5\"]", "/claims/2/between: a list of 1; 2 to 2 items are wanted"),
+                fault("[\"0.5\", \"1\"]", "[\"0.5\"]", "/claims/2/between: a list of 1; 2 items are wanted"),
                 fault(
                         "\"to\": \"all/5/sequential-scan\"",
                         "\"to\": \"all/3/sequential-scan\"",
