@@ -155,6 +155,15 @@ public final class Bag {
         return mismatches;
     }
 
+    /** Returns the digest that {@link #mismatches} found a file to have. */
+    public String found(String path) {
+        String digest = found.get(path);
+        if (digest == null) {
+            throw new IllegalStateException(path + " was not hashed yet");
+        }
+        return digest;
+    }
+
     /** Opens a file. */
     public InputStream open(String path) throws IOException {
         return files.open(path);

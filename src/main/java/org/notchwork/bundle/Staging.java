@@ -6,6 +6,7 @@ import java.nio.channels.FileChannel;
 import java.nio.channels.FileLock;
 import java.nio.channels.OverlappingFileLockException;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.FileSystemException;
 import java.nio.file.FileVisitResult;
 import java.nio.file.Files;
 import java.nio.file.LinkOption;
@@ -51,9 +52,14 @@ final class Staging implements AutoCloseable {
             throw new IOException(target + ": this is no place for a bundle; name a new folder");
         }
         requireFree(place, replace);
-        Files.createDirectories(place.getParent());
         Path lockFile = hidden(place, "lock");
-        FileChannel channel = locked(lockFile, target);
+        FileChannel channel;
+        try {
+            Files.createDirectories(place.getParent());
+            channel = locked(lockFile, target);
+        } catch (FileSystemException e) {
+            throw new IOException(target + ": cannot be written; name a folder where you may write", e);
+        }
         try {
             Staging staging = new Staging(place, replace, lockFile, channel);
             staging.recover();

@@ -1,5 +1,6 @@
 package org.notchwork.check;
 
+import java.util.ArrayList;
 import java.util.List;
 import org.notchwork.bits.Word;
 import org.notchwork.engine.BlindEngine;
@@ -28,7 +29,7 @@ public final class InstanceExaminer {
 
     private final List<Engine> engines;
 
-    /** Creates an examiner that compares these engines where they apply. */
+    /** Creates an examiner that always compares these engines, where they apply. */
     public InstanceExaminer(List<Engine> engines) {
         this.engines = List.copyOf(engines);
     }
@@ -82,7 +83,7 @@ public final class InstanceExaminer {
             return Comparison.NONE;
         }
         Comparison comparison = Comparison.NONE;
-        for (Engine engine : engines) {
+        for (Engine engine : compared(experiment)) {
             if (engine.refusal(experiment.problem(), width).isEmpty()) {
                 long wrong = wrongWords(open(engine, instance).outcomes(), period);
                 comparison = comparison.plus(
@@ -93,6 +94,16 @@ public final class InstanceExaminer {
             }
         }
         return comparison;
+    }
+
+    /** The engines that are always compared, then those that the experiment names besides. */
+    private List<Engine> compared(Experiment experiment) {
+        List<Engine> compared = new ArrayList<>(engines);
+        experiment.strategies().stream()
+                .flatMap(choice -> choice.engine().stream())
+                .filter(engine -> compared.stream().noneMatch(c -> c.name().equals(engine.name())))
+                .forEach(compared::add);
+        return compared;
     }
 
     private static Simulation open(Engine engine, Instance instance) {

@@ -61,7 +61,7 @@ final class EstimateVerb implements Verb {
         } else {
             print(cells, terminal);
             terminal.out()
-                    .println("all: about " + Progress.duration(nanos) + " on " + threads
+                    .println("all: " + Progress.duration(nanos) + " on " + threads
                             + " threads (good to a factor of 3), about " + Sizes.text((double) memory * threads)
                             + " for trials; Java may use "
                             + Sizes.text((double) Runtime.getRuntime().maxMemory()));

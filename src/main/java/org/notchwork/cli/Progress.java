@@ -43,7 +43,7 @@ final class Progress {
             return;
         }
         boolean known = share > LEAST_SHARE && now - start > LEAST_NANOS;
-        String left = known ? ", about " + duration((now - start) * (1 - share) / share) + " left" : "";
+        String left = known ? ", about " + duration(Math.max(1e9, (now - start) * (1 - share) / share)) + " left" : "";
         String percent = String.format(Locale.ROOT, "%3.0f %%", share * 100);
         if (terminal.live()) {
             int full = (int) Math.round(share * BAR);
@@ -70,8 +70,11 @@ final class Progress {
     /** Returns a duration in words. */
     static String duration(double nanos) {
         double seconds = nanos / 1e9;
+        if (seconds < 1) {
+            return "under 1 s";
+        }
         if (seconds < 90) {
-            return String.format(Locale.ROOT, "%.0f s", Math.max(1, seconds));
+            return String.format(Locale.ROOT, "%.0f s", seconds);
         }
         if (seconds < 90 * 60) {
             return String.format(Locale.ROOT, "%.0f min", seconds / 60);

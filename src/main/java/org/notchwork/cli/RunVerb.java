@@ -68,7 +68,7 @@ final class RunVerb implements Verb {
                             },
                             () -> environment(start, threads));
         } catch (IOException e) {
-            throw new Refusal(Exit.UNFINISHED, IoText.of(e));
+            throw new Refusal(Exit.UNFINISHED, IoText.of(e, target));
         } finally {
             progress.end();
         }

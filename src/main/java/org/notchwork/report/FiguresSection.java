@@ -14,6 +14,11 @@ import org.notchwork.study.Experiment;
 final class FiguresSection {
 
     private static final int PLACES = 3;
+
+    /** Numbers with more digits before the point are set with fewer after it, so that a column holds them. */
+    private static final int THREE_DIGITS = 3;
+
+    private static final int FIVE_DIGITS = 5;
     private static final float CHART_ROOM = 380;
 
     private final Results results;
@@ -118,6 +123,7 @@ final class FiguresSection {
     }
 
     private static String decimal(BigDecimal value) {
-        return Decimals.text(value, PLACES);
+        int whole = value.precision() - value.scale();
+        return Decimals.text(value, whole > FIVE_DIGITS ? 0 : whole > THREE_DIGITS ? 1 : PLACES);
     }
 }

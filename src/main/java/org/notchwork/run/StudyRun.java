@@ -34,7 +34,7 @@ public final class StudyRun {
     private final Study study;
     private final int threads;
     private final TrialRunner runner;
-    private final InstanceExaminer examiner = new InstanceExaminer(Engines.all());
+    private final InstanceExaminer examiner = new InstanceExaminer(Engines.reference());
 
     /**
      * Creates a run.

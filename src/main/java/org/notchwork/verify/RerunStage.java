@@ -38,7 +38,7 @@ final class RerunStage {
     private final Bag bag;
     private final VerifyOptions options;
     private final TrialRunner runner;
-    private final InstanceExaminer examiner = new InstanceExaminer(Engines.all());
+    private final InstanceExaminer examiner = new InstanceExaminer(Engines.reference());
     private final Findings findings = new Findings();
     private long compared;
 

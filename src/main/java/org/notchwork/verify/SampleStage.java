@@ -131,7 +131,7 @@ final class SampleStage {
         }
         if (CrossChecker.isExhaustive(files.study(), width)) {
             TrialGroup group = new TrialGroup(experiment.id(), width, trial, List.of(record));
-            InstanceTally tally = new InstanceExaminer(Engines.all()).examine(experiment, instance, group);
+            InstanceTally tally = new InstanceExaminer(Engines.reference()).examine(experiment, instance, group);
             examined = examined.plus(tally);
             if (tally.answers().outcome() == CheckOutcome.DIFFERS
                     || tally.engines().outcome() == CheckOutcome.DIFFERS) {

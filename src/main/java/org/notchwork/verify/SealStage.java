@@ -23,7 +23,7 @@ final class SealStage {
      * Returns the report.
      *
      * @param files the opened files
-     * @param bag the bag; its digests were checked already
+     * @param bag the bag; its files were hashed already, whether or not as listed
      * @param pass the pass over the lines
      * @param expect the seal that the referee has from elsewhere
      */
@@ -31,7 +31,7 @@ final class SealStage {
         Findings findings = new Findings();
         Seal seal = files.seal();
         for (Map.Entry<String, String> sealed : seal.files().entrySet()) {
-            String found = bag.listed(Layout.DATA + sealed.getKey());
+            String found = bag.found(Layout.DATA + sealed.getKey());
             compare(findings, "/files/" + sealed.getKey(), sealed.getValue(), found);
             Optional.ofNullable(pass.digests().get(sealed.getKey()))
                     .filter(d -> !d.equals(found))

@@ -46,7 +46,7 @@ public record Verdict(List<StageReport> stages, Optional<String> seal, long fail
         }
         StageReport rerun = stages.get(stages.size() - 1);
         return rerun.outcome() == StageOutcome.PASSED
-                ? "YES: intact; figures follow from the lines; recomputed: identical (" + rerun.sentence() + ")"
+                ? "YES: intact; figures follow from the lines; re-run " + rerun.sentence()
                 : "YES: intact; figures follow from the lines; no trial was run again (--rerun 50 runs some)";
     }
 

@@ -75,7 +75,8 @@ public final class Verifier {
                 Stage.HASHES,
                 findings,
                 "all digests as listed",
-                findings.count() + " files do not have the listed digest"));
+                findings.count() + (findings.count() == 1 ? " file does" : " files do")
+                        + " not have the listed digest"));
     }
 
     private Verdict opened(Bag bag) throws IOException, BundleFault, OpenedFiles.Malformed, InterruptedException {
@@ -108,7 +109,7 @@ public final class Verifier {
             throws IOException, BundleFault {
         if (!complete) {
             return StageReport.of(
-                    Stage.RERUN, StageOutcome.NOT_DONE, "not done: the lines are not those that the study calls for");
+                    Stage.RERUN, StageOutcome.NOT_DONE, "the lines are not those that the study calls for");
         }
         if (options.rerun() instanceof Rerun.All) {
             return new RerunStage(files, bag, options, runner).all(counting(Stage.RERUN, instances));
@@ -117,7 +118,7 @@ public final class Verifier {
             return new SampleStage(files, bag, options, runner)
                     .sample(sample.trials(), counting(Stage.RERUN, sample.trials()));
         }
-        return StageReport.of(Stage.RERUN, StageOutcome.NOT_DONE, "not done: no trial was run again");
+        return StageReport.of(Stage.RERUN, StageOutcome.NOT_DONE, "no trial was run again");
     }
 
     private LinePass.Listener counting(Stage stage, long all) {
@@ -129,7 +130,7 @@ public final class Verifier {
         reports.add(StageReport.of(stage, StageOutcome.MALFORMED, line));
         for (Stage later : Stage.values()) {
             if (later.compareTo(stage) > 0) {
-                reports.add(StageReport.of(later, StageOutcome.NOT_DONE, "not done"));
+                reports.add(StageReport.of(later, StageOutcome.NOT_DONE, "an earlier stage stopped here"));
             }
         }
         return new Verdict(reports, Optional.empty(), 0);

@@ -128,11 +128,12 @@ class InstanceExaminerTest {
         }
     }
 
+    /** The two engines given, and the two more that the experiment names. */
     @Test
     void anEngineWithOtherOutcomesDiffers() {
         List<Engine> engines = List.of(new FibreEngine(), new Uniform());
         InstanceTally tally = new InstanceExaminer(engines).examine(experiment, instance, group);
-        assertEquals(new Comparison(2, 1, Optional.of("trial 0: uniform differs on 16 words")), tally.engines());
+        assertEquals(new Comparison(4, 1, Optional.of("trial 0: uniform differs on 16 words")), tally.engines());
     }
 
     @Test

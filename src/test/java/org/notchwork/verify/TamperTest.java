@@ -292,6 +292,22 @@ class TamperTest {
         }
     }
 
+    /** The seal is compared with the bytes, not with what a manifest says of them. */
+    @Test
+    void aChangedFileBreaksTheSealAsWellAsItsDigest() throws Exception {
+        for (String file : List.of(CELLS, "claims.json", "cross-checks.json")) {
+            Path bundle = BundleFixture.copy(good, folder.resolve("changed-" + file));
+            BundleFixture.edit(bundle, file, t -> t.replaceFirst("all/5", "all/3"));
+            List<StageReport> stages = BundleFixture.verify(bundle).stages();
+            assertEquals(StageOutcome.FAILED, stages.get(1).outcome(), file);
+            assertEquals(
+                    StageOutcome.FAILED,
+                    stages.get(3).outcome(),
+                    file + stages.get(3).sentence());
+            assertTrue(stages.get(3).findings().get(0).text().contains("/files/" + file), file);
+        }
+    }
+
     @Test
     void aForgedExhaustiveCheckIsFoundByAFullReRunOnly() throws Exception {
         Path bundle = BundleFixture.copy(good, folder.resolve("forged"));
