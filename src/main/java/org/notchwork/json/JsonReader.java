@@ -195,6 +195,8 @@ public final class JsonReader {
             return new JsonFault(place, "the document ends too early", "the rest of it is wanted");
         }
         return new JsonFault(
-                place, "this is not JSON", "a comma, a bracket, a quotation mark or a value is wrong or missing here");
+                place,
+                "this is not JSON",
+                "a comma, a bracket, a quotation mark, an escape or a value is wrong or missing here");
     }
 }

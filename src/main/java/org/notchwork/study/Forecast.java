@@ -34,6 +34,9 @@ public final class Forecast {
     /** Nanoseconds of writing and hashing the line of a trial. */
     private static final double LINE = 15_000;
 
+    /** Calls by which a quantum strategy confirms its answer, which its law does not count. */
+    private static final int CONFIRMING = 2;
+
     private static final int ENGINES_WIDTH = 10;
     private static final long FIRST_INSTANCES = 16;
 
@@ -87,9 +90,6 @@ public final class Forecast {
                 .map(law -> law.mean(width).value());
         BigDecimal limit = BigDecimal.valueOf(experiment.queryLimit());
         BigDecimal queries = mean.map(m -> m.min(limit)).orElse(limit);
-        Optional<String> remark = mean.filter(m -> m.compareTo(limit) > 0)
-                .map(m -> "mean " + Decimals.text(m, 0) + " is above the limit " + experiment.queryLimit()
-                        + ": most trials will be censored");
         double perQuery = choice.engine().isPresent() ? sampling(choice.engine().get(), width) : QUERY;
         double preparing = choice.engine().map(e -> preparing(e, width)).orElse(0.0);
         double share = drawing(problem, width) / experiment.strategies().size();
@@ -102,7 +102,23 @@ public final class Forecast {
                 queries,
                 LINE + share + preparing + queries.doubleValue() * perQuery,
                 memory,
-                remark);
+                mean.flatMap(m -> remark(m, choice, experiment.queryLimit())));
+    }
+
+    /**
+     * Returns a warning if a trial of mean length is cut; the limit is on all calls, those that confirm included.
+     *
+     * <p>At the mean itself 41 % to 67 % of random draws, 50 % to 67 % of scans and 34 % to 50 % of Fourier samplings are
+     * cut (derived from their distributions, widths 2 to 16); a lower limit cuts more.
+     */
+    private static Optional<String> remark(BigDecimal mean, StrategyChoice choice, long limit) {
+        int confirming = choice.engine().isPresent() ? CONFIRMING : 0;
+        if (mean.add(BigDecimal.valueOf(confirming)).compareTo(BigDecimal.valueOf(limit)) <= 0) {
+            return Optional.empty();
+        }
+        String calls = "mean " + Decimals.text(mean, confirming == 0 ? 0 : 1)
+                + (confirming == 0 ? " is" : " and " + confirming + " confirming calls are");
+        return Optional.of(calls + " above the limit " + limit + ": many trials will be censored");
     }
 
     private static double drawing(Problem problem, int width) {

@@ -1,8 +1,8 @@
 package org.notchwork.verify;
 
+import java.util.Optional;
 import java.util.Set;
 import java.util.TreeSet;
-import java.util.function.BiConsumer;
 import org.notchwork.json.CanonicalJson;
 import org.notchwork.json.Fault;
 import org.notchwork.json.JsonArray;
@@ -40,32 +40,29 @@ final class JsonDifference {
         if (written instanceof JsonObject a && recomputed instanceof JsonObject b) {
             Set<String> names = new TreeSet<>(a.members().keySet());
             names.addAll(b.members().keySet());
-            for (String name : names) {
-                pair(
-                        Fault.step(pointer, name),
-                        a.members().get(name),
-                        b.members().get(name),
-                        (x, y) -> compare(Fault.step(pointer, name), x, y));
-            }
+            names.forEach(name -> pair(Fault.step(pointer, name), a.member(name), b.member(name)));
         } else if (written instanceof JsonArray a && recomputed instanceof JsonArray b) {
             int longer = Math.max(a.items().size(), b.items().size());
             for (int i = 0; i < longer; i++) {
-                String step = Fault.step(pointer, Integer.toString(i));
-                JsonValue x = i < a.items().size() ? a.items().get(i) : null;
-                JsonValue y = i < b.items().size() ? b.items().get(i) : null;
-                pair(step, x, y, (p, q) -> compare(step, p, q));
+                pair(Fault.step(pointer, Integer.toString(i)), item(a, i), item(b, i));
             }
         } else {
             sink.differs(pointer, CanonicalJson.text(written), CanonicalJson.text(recomputed));
         }
     }
 
-    private void pair(String pointer, JsonValue a, JsonValue b, BiConsumer<JsonValue, JsonValue> both) {
-        if (a == null || b == null) {
-            sink.differs(
-                    pointer, a == null ? ABSENT : CanonicalJson.text(a), b == null ? ABSENT : CanonicalJson.text(b));
+    private void pair(String pointer, Optional<JsonValue> a, Optional<JsonValue> b) {
+        if (a.isPresent() && b.isPresent()) {
+            compare(pointer, a.get(), b.get());
         } else {
-            both.accept(a, b);
+            sink.differs(
+                    pointer,
+                    a.map(CanonicalJson::text).orElse(ABSENT),
+                    b.map(CanonicalJson::text).orElse(ABSENT));
         }
+    }
+
+    private static Optional<JsonValue> item(JsonArray array, int index) {
+        return index < array.items().size() ? Optional.of(array.items().get(index)) : Optional.empty();
     }
 }

@@ -86,7 +86,7 @@ class FormatPageTest {
     @Test
     void theInstancesOfThePageAreThoseOfTheProgram() throws IOException {
         List<List<String>> rows = rows("| instances | experiment |");
-        assertEquals(4, rows.size());
+        assertEquals(5, rows.size());
         for (List<String> row : rows) {
             int width = Integer.parseInt(row.get(2));
             XorPeriod problem = new XorPeriod(Labelling.valueOf(row.get(0).toUpperCase(Locale.ROOT)));

@@ -159,4 +159,44 @@ class EngineSamplingTest {
         assertThrows(IllegalArgumentException.class, () -> new Outcomes(new long[] {2, -1}));
         assertEquals(2, half.total());
     }
+
+    /** A rule of the format: up to |F|² = n · 2^n words are drawn until one is kept; 4² ≤ 3 · 2³. */
+    @Test
+    void aFibreOfFourAmongEightPointsIsSampledByRejection() {
+        Simulation simulation =
+                new FibreEngine().open(new Unitary(Given.of(3, 1, 0, 0, 0, 0, 1, 1, 1, 1), new Meter(50)));
+        RandomStream drawn = Streams.named("rejection");
+        RandomStream words = Streams.named("rejection");
+        for (int i = 0; i < 50; i++) {
+            words.bits(3);
+            long y;
+            do {
+                y = words.bits(3);
+                // Both fibres are {v, …, v + 3}: the amplitude is ±4 on y = 0 and 4 and 0 elsewhere.
+            } while (words.below(16) >= (y % 4 == 0 ? 16 : 0));
+            assertEquals(y, simulation.fourierSample(drawn));
+        }
+        assertEquals(words.nextLong(), drawn.nextLong());
+    }
+
+    /** One point more, and 5² &gt; 3 · 2³: one draw below the sum of all squares, which is 8 · 5. */
+    @Test
+    void aFibreOfFiveAmongEightPointsIsSampledByTheTransform() {
+        Simulation simulation =
+                new FibreEngine().open(new Unitary(Given.of(3, 2, 0, 0, 0, 0, 0, 1, 2, 3), new Meter(50)));
+        // Squares of the sums over {0, …, 4} of (−1)^(x·y), by hand: 5 1 1 1 3 −1 −1 −1.
+        Measurement squares = new Measurement(new long[] {25, 1, 1, 1, 9, 1, 1, 1});
+        RandomStream drawn = Streams.named("transform");
+        RandomStream words = Streams.named("transform");
+        for (int i = 0; i < 50; i++) {
+            long y = simulation.fourierSample(drawn);
+            if (words.bits(3) < 5) {
+                assertEquals(squares.draw(words), y);
+            } else {
+                // A fibre of one point: every word is kept at once, and a bound of 1 draws nothing.
+                assertEquals(words.bits(3), y);
+            }
+        }
+        assertEquals(words.nextLong(), drawn.nextLong());
+    }
 }

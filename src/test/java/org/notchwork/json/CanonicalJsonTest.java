@@ -59,6 +59,76 @@ class CanonicalJsonTest {
                 CanonicalJson.bytes(reader.read(Files.readAllBytes(input))));
     }
 
+    /** The pair "weird" of the published vectors of RFC 8785, typed in. */
+    @Test
+    void writesThePublishedWeirdPair() throws JsonFault {
+        String input = """
+                {
+                  "\\u20ac": "Euro Sign",
+                  "\\r": "Carriage Return",
+                  "\\u000a": "Newline",
+                  "1": "One",
+                  "\\u0080": "Control\\u007f",
+                  "\\ud83d\\ude02": "Smiley",
+                  "\\u00f6": "Latin Small Letter O With Diaeresis",
+                  "\\ufb33": "Hebrew Letter Dalet With Dagesh",
+                  "</script>": "Browser Challenge"
+                }
+                """;
+        assertEquals(
+                "{\"\\n\":\"Newline\",\"\\r\":\"Carriage Return\",\"1\":\"One\",\"</script>\":\"Browser Challenge\","
+                        + "\"\u0080\":\"Control\u007f\",\"\u00f6\":\"Latin Small Letter O With Diaeresis\","
+                        + "\"\u20ac\":\"Euro Sign\",\"\ud83d\ude02\":\"Smiley\","
+                        + "\"\ufb33\":\"Hebrew Letter Dalet With Dagesh\"}",
+                CanonicalJson.text(reader.read(input.getBytes(StandardCharsets.UTF_8))));
+    }
+
+    /**
+     * Third opinion: {@code jq -cjS .} writes the same bytes, names being ASCII and DEL not used, as in every sealed file
+     * (jq orders names by code point, and escapes DEL).
+     */
+    @Test
+    void jqWritesTheSameBytes() throws IOException, InterruptedException {
+        assumeTrue(hasJq(), "jq is not on this machine");
+        SeedTree seeds = new SeedTree(new Seed("random documents for another program"));
+        for (int i = 0; i < 20; i++) {
+            List<JsonValue> rows = new ArrayList<>();
+            for (int row = 0; row < 50; row++) {
+                RandomStream stream = seeds.stream(new Address("documents", row + 1, i, "test"));
+                rows.add(JsonObject.builder()
+                        .put("z" + stream.bits(8), value(stream, 0))
+                        .put("a" + stream.bits(8), new JsonText(text(stream).replace("\u007f", "")))
+                        .put("B", new JsonInteger(stream.bits(53) - (1L << 52)))
+                        .build());
+            }
+            byte[] ours = CanonicalJson.bytes(new JsonArray(rows.stream()
+                    .map(row -> CanonicalJson.text(row).contains("\u007f") ? new JsonBoolean(true) : row)
+                    .toList()));
+            assertArrayEquals(ours, jq(ours), "document " + i);
+        }
+    }
+
+    private static boolean hasJq() throws InterruptedException {
+        try {
+            return new ProcessBuilder("jq", "--version").start().waitFor() == 0;
+        } catch (IOException e) {
+            return false;
+        }
+    }
+
+    private static byte[] jq(byte[] document) throws IOException, InterruptedException {
+        Path file = Files.createTempFile("document", ".json");
+        try {
+            Files.write(file, document);
+            Process process = new ProcessBuilder("jq", "-cjS", ".", file.toString()).start();
+            byte[] written = process.getInputStream().readAllBytes();
+            assertEquals(0, process.waitFor());
+            return written;
+        } finally {
+            Files.delete(file);
+        }
+    }
+
     /** Second opinion: io.github.erdtman java-json-canonicalization 1.1. */
     @Test
     void agreesWithThePublishedCanonicaliserOnRandomDocuments() throws IOException, JsonFault {

@@ -143,4 +143,22 @@ class XorPeriodTest {
         assertThrows(IllegalArgumentException.class, () -> new Cosets(6, 0));
         assertThrows(IllegalArgumentException.class, () -> new Cosets(6, 64));
     }
+
+    /** The draw of s comes first and is all that a given answer saves; the labels follow. */
+    @ParameterizedTest
+    @EnumSource(Labelling.class)
+    void aGivenAnswerSkipsTheDrawOfThePeriodAndNothingElse(Labelling labelling) {
+        XorPeriod problem = new XorPeriod(labelling);
+        for (int width = 2; width <= 9; width++) {
+            RandomStream whole = Streams.numbered("skip", width);
+            RandomStream rest = Streams.numbered("skip", width);
+            Instance drawn = problem.draw(width, whole);
+            assertEquals(new Answer.Period(Word.of(width, rest.nonZeroBits(width))), drawn.hidden());
+            Instance given = problem.drawHiding(drawn.hidden(), width, rest);
+            for (long x = 0; x < 1L << width; x++) {
+                assertEquals(drawn.function().at(x), given.function().at(x));
+            }
+            assertEquals(whole.nextLong(), rest.nextLong());
+        }
+    }
 }
