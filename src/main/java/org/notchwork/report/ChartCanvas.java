@@ -2,6 +2,7 @@ package org.notchwork.report;
 
 import de.rototor.pdfbox.graphics2d.PdfBoxGraphics2D;
 import de.rototor.pdfbox.graphics2d.PdfBoxGraphics2DFontTextDrawer;
+import java.awt.Font;
 import java.awt.Graphics2D;
 import java.io.IOException;
 import java.util.function.Consumer;
@@ -13,12 +14,13 @@ final class ChartCanvas {
 
     private ChartCanvas() {}
 
-    /** Returns what was painted, as a form that can be placed on a page. */
-    static PDFormXObject draw(PDDocument document, Fonts fonts, int width, int height, Consumer<Graphics2D> painter)
+    /** Returns what was painted, all text in one font, as a form that can be placed on a page. */
+    static PDFormXObject draw(
+            PDDocument document, Fonts fonts, Font font, int width, int height, Consumer<Graphics2D> painter)
             throws IOException {
         PdfBoxGraphics2D graphics = new PdfBoxGraphics2D(document, width, height);
         try (PdfBoxGraphics2DFontTextDrawer drawer = new PdfBoxGraphics2DFontTextDrawer()) {
-            drawer.registerFont("DejaVu Sans", fonts.body());
+            drawer.registerFont(font.getFontName(), fonts.body());
             graphics.setFontTextDrawer(drawer);
             painter.accept(graphics);
         } finally {

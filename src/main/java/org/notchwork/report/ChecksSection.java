@@ -1,67 +1,95 @@
 package org.notchwork.report;
 
 import java.io.IOException;
-import java.util.Comparator;
 import java.util.List;
-import org.notchwork.bundle.Results;
+import java.util.Optional;
 import org.notchwork.check.CheckKind;
 import org.notchwork.check.CheckOutcome;
 import org.notchwork.check.CrossCheck;
 
-/** The calibration of the measuring stick, and every other cross-check; those that differ go first. */
+/** Every cross-check: those that differ first, then the others by kind. */
 final class ChecksSection {
 
-    private final Results results;
+    private final List<CrossCheck> checks;
 
-    ChecksSection(Results results) {
-        this.results = results;
+    ChecksSection(List<CrossCheck> checks) {
+        this.checks = List.copyOf(checks);
     }
 
     void set(Flow flow) throws IOException {
-        calibration(flow);
         flow.heading("Cross-checks");
-        Table table = new Table(List.of(
-                Table.Column.left("check", 18),
-                Table.Column.left("on", 24),
-                Table.Column.right("compared", 12),
-                Table.Column.left("expected", 40),
-                Table.Column.left("observed", 28),
-                Table.Column.left("outcome", 12)));
-        results.checks().stream()
-                .filter(c -> c.kind() != CheckKind.THEORY_MEAN || c.outcome() == CheckOutcome.DIFFERS)
-                .sorted(Comparator.comparing((CrossCheck c) -> c.outcome() != CheckOutcome.DIFFERS))
-                .forEach(c -> table.add(List.of(
-                        c.kind().word(),
-                        c.subject(),
-                        Long.toString(c.compared()),
-                        c.expected(),
-                        c.observed(),
-                        c.outcome().word())));
-        table.set(flow);
+        List<CrossCheck> differing =
+                checks.stream().filter(c -> c.outcome() == CheckOutcome.DIFFERS).toList();
+        if (!differing.isEmpty()) {
+            flow.subheading("Those that DIFFER");
+            differing(flow, differing);
+        }
+        for (CheckKind kind : CheckKind.values()) {
+            List<CrossCheck> others = checks.stream()
+                    .filter(c -> c.kind() == kind && c.outcome() != CheckOutcome.DIFFERS)
+                    .toList();
+            if (kind == CheckKind.THEORY_MEAN && !others.isEmpty()) {
+                flow.subheading(kind.word() + ": " + kind.statement());
+                flow.note(Numbers.count(others.size(), "check") + ", listed above as the calibration.");
+            } else if (!others.isEmpty()) {
+                flow.subheading(kind.word() + ": " + kind.statement());
+                table(flow, others);
+            }
+        }
     }
 
-    private void calibration(Flow flow) throws IOException {
-        flow.heading("Calibration: the exact law beside the observed mean");
-        Table table = new Table(List.of(
-                Table.Column.left("cell", 34),
-                Table.Column.right("trials", 9),
-                Table.Column.left("law", 40),
-                Table.Column.left("observed", 40),
-                Table.Column.right("standard errors apart", 14),
-                Table.Column.left("outcome", 13)));
-        for (CrossCheck check : results.checks()) {
-            if (check.kind() == CheckKind.THEORY_MEAN) {
-                table.add(List.of(
-                        check.subject(),
-                        Long.toString(check.compared()),
-                        check.expected(),
-                        check.observed(),
-                        check.standardErrors().orElse("-"),
-                        check.outcome().word()));
+    /** Sets checks of one kind; an expectation that is the same for all of them is said once, before them. */
+    private static void table(Flow flow, List<CrossCheck> checks) throws IOException {
+        Optional<String> common = common(checks);
+        flow.note("Source: " + checks.get(0).kind().source() + "."
+                + common.map(c -> " Expected each time: " + c + ".").orElse(""));
+        Table table = common.isPresent()
+                ? new Table(
+                        Table.Column.left("on"),
+                        Table.Column.right("compared"),
+                        Table.Column.left("observed"),
+                        Table.Column.left("outcome"))
+                : new Table(
+                        Table.Column.left("on"),
+                        Table.Column.right("compared"),
+                        Table.Column.left("expected"),
+                        Table.Column.left("observed"),
+                        Table.Column.left("outcome"));
+        for (CrossCheck check : checks) {
+            String compared = Long.toString(check.compared());
+            String outcome = check.outcome().word();
+            if (common.isPresent()) {
+                table.add(check.subject(), compared, check.observed(), outcome);
+            } else {
+                table.add(check.subject(), compared, check.expected(), check.observed(), outcome);
             }
         }
         table.set(flow);
-        flow.note("The standard error comes from the variance of the law. Beyond five of them the check differs; by"
-                + " chance a normal mean lies there with probability 5.7e-7.");
+    }
+
+    private static void differing(Flow flow, List<CrossCheck> checks) throws IOException {
+        Table table = new Table(
+                Table.Column.left("check"),
+                Table.Column.left("on"),
+                Table.Column.right("compared"),
+                Table.Column.left("expected"),
+                Table.Column.left("observed"),
+                Table.Column.left("outcome"));
+        for (CrossCheck check : checks) {
+            table.add(
+                    check.kind().word(),
+                    check.subject(),
+                    Long.toString(check.compared()),
+                    check.expected(),
+                    check.observed(),
+                    check.outcome().word());
+        }
+        table.set(flow);
+    }
+
+    private static Optional<String> common(List<CrossCheck> checks) {
+        List<String> expected =
+                checks.stream().map(CrossCheck::expected).distinct().toList();
+        return expected.size() == 1 ? Optional.of(expected.get(0)) : Optional.empty();
     }
 }

@@ -1,25 +1,21 @@
 package org.notchwork.report;
 
 import java.io.IOException;
-import java.math.BigDecimal;
 import java.util.List;
 import org.notchwork.bundle.Results;
 import org.notchwork.exact.Decimals;
 import org.notchwork.figure.CellFigures;
 import org.notchwork.figure.Interval;
-import org.notchwork.figure.RatioFigures;
+import org.notchwork.figure.QueryFigures;
 import org.notchwork.study.Experiment;
 
-/** Charts and tables of every cell, and the ratios on paired trials. */
+/** For every experiment its chart and two tables of all its cells: how trials ended, and what they cost. */
 final class FiguresSection {
 
-    private static final int PLACES = 3;
+    private static final String NONE = "–";
 
-    /** Numbers with more digits before the point are set with fewer after it, so that a column holds them. */
-    private static final int THREE_DIGITS = 3;
-
-    private static final int FIVE_DIGITS = 5;
-    private static final float CHART_ROOM = 380;
+    /** Room for the heading over a chart. */
+    private static final float HEADING = 44;
 
     private final Results results;
 
@@ -32,98 +28,93 @@ final class FiguresSection {
             List<CellFigures> cells = results.summary().cells().stream()
                     .filter(c -> c.cell().experiment().equals(experiment.id()))
                     .toList();
-            flow.require(CHART_ROOM);
+            QueryChart chart = new QueryChart(experiment, cells);
+            flow.require(chart.height() + HEADING);
             flow.heading("Experiment " + experiment.id() + ": queries against width");
-            flow.drawing(new QueryChart(experiment, cells).draw(flow.document(), flow.fonts()));
+            flow.drawing(chart.draw(flow.document(), flow.fonts()), chart.words());
             flow.note(
                     "Points: observed means with 95 % intervals, set slightly apart where they would cover one another."
-                            + " Dotted lines of the same colour: the exact law of the strategy. Confirming calls are not"
-                            + " included.");
-            table(cells).set(flow);
-            flow.note(
-                    "success: 95 % Clopper-Pearson interval; q: quartiles; conf.: confirming calls. cens.: censored, the query"
-                            + " limit was reached; such a trial counts with what it had spent, so the mean is a lower bound.");
+                            + " Confirming calls are not included.");
+            outcomes(flow, experiment, cells);
+            queries(flow, experiment, cells);
         }
-        ratios(flow);
     }
 
-    private static Table table(List<CellFigures> cells) {
-        Table table = Table.wide(List.of(
-                Table.Column.right("n", 15),
-                Table.Column.left("strategy", 102),
-                Table.Column.left("sees", 29),
-                Table.Column.right("trials", 26),
-                Table.Column.right("solved", 28),
-                Table.Column.right("wrong", 29),
-                Table.Column.right("cens.", 25),
-                Table.Column.left("success", 45),
-                Table.Column.right("mean", 42),
-                Table.Column.right("s.d.", 40),
-                Table.Column.left("95 % of the mean", 78),
-                Table.Column.right("min/q1/med/q3/max", 80),
-                Table.Column.right("conf.", 24)));
+    private static void outcomes(Flow flow, Experiment experiment, List<CellFigures> cells) throws IOException {
+        flow.subheading("How the trials of " + experiment.id() + " ended");
+        Table table = new Table(
+                Table.Column.right("n"),
+                Table.Column.left("strategy@engine"),
+                Table.Column.left("sees"),
+                Table.Column.right("trials"),
+                Table.Column.right("solved"),
+                Table.Column.right("wrong"),
+                Table.Column.right("censored"),
+                Table.Column.right("success"),
+                Table.Column.right("95 % from"),
+                Table.Column.right("to"),
+                Table.Column.right("confirming calls"));
+        int width = -1;
         for (CellFigures cell : cells) {
-            table.add(List.of(
-                    Integer.toString(cell.cell().width()),
+            if (cell.cell().width() != width) {
+                table.group();
+                width = cell.cell().width();
+            }
+            table.add(
+                    Integer.toString(width),
                     cell.cell().label(),
-                    cell.sight().orElse(""),
+                    cell.sight().orElse(NONE),
                     Long.toString(cell.trials()),
                     Long.toString(cell.solved()),
                     Long.toString(cell.wrong()),
                     Long.toString(cell.censored()),
-                    interval(cell.successInterval()),
-                    decimal(cell.queries().mean()),
-                    cell.queries().deviation().map(FiguresSection::decimal).orElse("-"),
-                    cell.queries().interval().map(FiguresSection::interval).orElse("-"),
-                    cell.queries().min() + "/" + cell.queries().lowerQuartile() + "/"
-                            + cell.queries().median() + "/" + cell.queries().upperQuartile() + "/"
-                            + cell.queries().max(),
-                    Long.toString(cell.confirming())));
-        }
-        return table;
-    }
-
-    /** The ratios of classical over quantum strategies; all of them where a study has only one sort. */
-    private List<RatioFigures> shown() {
-        List<RatioFigures> mixed = results.summary().ratios().stream()
-                .filter(r -> r.to().label().contains("@") && !r.of().label().contains("@"))
-                .toList();
-        return mixed.isEmpty() ? results.summary().ratios() : mixed;
-    }
-
-    private void ratios(Flow flow) throws IOException {
-        if (results.summary().ratios().isEmpty()) {
-            return;
-        }
-        flow.heading("Ratios of mean queries on the same instances");
-        Table table = new Table(List.of(
-                Table.Column.left("experiment / n", 16),
-                Table.Column.left("of", 28),
-                Table.Column.left("over", 28),
-                Table.Column.right("pairs", 8),
-                Table.Column.right("ratio", 12),
-                Table.Column.left("95 % interval (Fieller)", 24)));
-        for (RatioFigures ratio : shown()) {
-            table.add(List.of(
-                    ratio.of().experiment() + " / " + ratio.of().width(),
-                    ratio.of().label(),
-                    ratio.to().label(),
-                    Long.toString(ratio.pairs()),
-                    decimal(ratio.ratio()),
-                    ratio.interval().map(FiguresSection::interval).orElse("none")));
+                    Decimals.text(cell.success()),
+                    Decimals.text(cell.successInterval().low()),
+                    Decimals.text(cell.successInterval().high()),
+                    Long.toString(cell.confirming()));
         }
         table.set(flow);
-        if (shown().size() < results.summary().ratios().size()) {
-            flow.note("Classical over quantum strategies; the other ratios stand in summary.json.");
+        flow.note("n: width. sees: what the engine of a quantum strategy works from; classical strategies have none."
+                + " censored: the query limit was reached. 95 % intervals of success by Clopper and Pearson (1934).");
+    }
+
+    private static void queries(Flow flow, Experiment experiment, List<CellFigures> cells) throws IOException {
+        flow.subheading("Queries of a trial of " + experiment.id());
+        Table table = new Table(
+                Table.Column.right("n"),
+                Table.Column.left("strategy@engine"),
+                Table.Column.right("mean"),
+                Table.Column.right("95 % from"),
+                Table.Column.right("to"),
+                Table.Column.right("s.d."),
+                Table.Column.right("min"),
+                Table.Column.right("q1"),
+                Table.Column.right("median"),
+                Table.Column.right("q3"),
+                Table.Column.right("max"));
+        int width = -1;
+        for (CellFigures cell : cells) {
+            if (cell.cell().width() != width) {
+                table.group();
+                width = cell.cell().width();
+            }
+            QueryFigures queries = cell.queries();
+            table.add(
+                    Integer.toString(width),
+                    cell.cell().label(),
+                    (cell.censored() > 0 ? "≥ " : "") + Numbers.decimal(queries.mean()),
+                    queries.interval().map(Interval::low).map(Numbers::decimal).orElse(NONE),
+                    queries.interval().map(Interval::high).map(Numbers::decimal).orElse(NONE),
+                    queries.deviation().map(Numbers::decimal).orElse(NONE),
+                    Long.toString(queries.min()),
+                    Long.toString(queries.lowerQuartile()),
+                    Long.toString(queries.median()),
+                    Long.toString(queries.upperQuartile()),
+                    Long.toString(queries.max()));
         }
-    }
-
-    private static String interval(Interval interval) {
-        return decimal(interval.low()) + "–" + decimal(interval.high());
-    }
-
-    private static String decimal(BigDecimal value) {
-        int whole = value.precision() - value.scale();
-        return Decimals.text(value, whole > FIVE_DIGITS ? 0 : whole > THREE_DIGITS ? 1 : PLACES);
+        table.set(flow);
+        flow.note("s.d.: standard deviation of the sample; q1, q3: quartiles. A censored trial counts with what it had"
+                + " spent; the mean of a cell with such trials is marked ≥, for it is a lower bound. 95 % intervals of the"
+                + " mean by Student's t.");
     }
 }

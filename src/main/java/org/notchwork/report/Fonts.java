@@ -42,9 +42,11 @@ record Fonts(PDFont body, PDFont bold, PDFont mono) {
 
     /** Returns the text with every character that a font lacks replaced by a question mark. */
     static String drawable(PDFont font, String text) throws IOException {
+        if (text.chars().allMatch(c -> c >= ' ' && c <= '~')) {
+            return text;
+        }
         StringBuilder out = new StringBuilder();
-        int[] points = text.codePoints().toArray();
-        for (int point : points) {
+        for (int point : text.codePoints().toArray()) {
             String one = Character.toString(point);
             out.append(has(font, one) ? one : SUBSTITUTE);
         }

@@ -4,11 +4,13 @@ import java.io.IOException;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import java.util.stream.Stream;
+import java.util.function.Predicate;
 import org.notchwork.bundle.Results;
+import org.notchwork.check.CheckOutcome;
 import org.notchwork.claim.ClaimVerdict;
 import org.notchwork.figure.CellFigures;
 import org.notchwork.study.Experiment;
+import org.notchwork.study.StrategyChoice;
 
 /** What is not covered, found from the results themselves. */
 final class LimitsSection {
@@ -21,34 +23,25 @@ final class LimitsSection {
 
     void set(Flow flow) throws IOException {
         flow.heading("What is not covered");
-        for (String line : lines()) {
-            flow.body("– " + line);
-        }
+        flow.items(lines());
     }
 
     private List<String> lines() {
         List<String> lines = new ArrayList<>();
-        for (Experiment experiment : results.study().experiments()) {
-            List<String> above = experiment.widths().stream()
-                    .filter(w -> w > results.study().crossCheckWidth())
-                    .map(String::valueOf)
-                    .toList();
-            if (!above.isEmpty()) {
-                lines.add("Experiment " + experiment.id() + ": widths " + String.join(", ", above)
-                        + " were not checked exhaustively; certificates and laws were.");
-            }
+        notExhaustive(lines);
+        long without = results.checks().stream()
+                .filter(c -> c.outcome() == CheckOutcome.NOT_COMPARABLE)
+                .count();
+        if (without > 0) {
+            lines.add(Numbers.count(without, "cross-check") + " had nothing to compare; their tables say why.");
         }
-        List<CellFigures> cells = results.summary().cells();
-        add(lines, cells.stream().filter(c -> c.censored() > 0), "Cells with censored trials");
-        add(
-                lines,
-                cells.stream().filter(c -> c.sight().equals(Optional.of("sighted"))),
-                "Cells of a sighted engine, which was told the secret");
+        cells(lines, "Some trials were censored", c -> c.censored() > 0);
+        cells(lines, "A sighted engine was told the secret", c -> c.sight().equals(Optional.of("sighted")));
         long undecided = results.claims().stream()
                 .filter(c -> c.verdict() == ClaimVerdict.UNDECIDED)
                 .count();
         if (undecided > 0) {
-            lines.add(undecided + " claims are undecided: more trials would be needed.");
+            lines.add("Undecided: " + Numbers.count(undecided, "claim") + "; the reasons stand with the claims.");
         }
         lines.add("The seed was chosen by the author, and no plan was published beforehand that this program knows of."
                 + " A run on a seed of the reader's own is the remedy.");
@@ -59,10 +52,34 @@ final class LimitsSection {
         return lines;
     }
 
-    private static void add(List<String> lines, Stream<CellFigures> cells, String what) {
-        List<String> ids = cells.map(c -> c.cell().id()).toList();
-        if (!ids.isEmpty()) {
-            lines.add(what + ": " + String.join(", ", ids) + ".");
+    private void notExhaustive(List<String> lines) {
+        for (Experiment experiment : results.study().experiments()) {
+            List<Integer> above = experiment.widths().stream()
+                    .filter(w -> w > results.study().crossCheckWidth())
+                    .toList();
+            if (!above.isEmpty()) {
+                lines.add("Experiment " + experiment.id() + ", not checked exhaustively: "
+                        + (above.size() == 1 ? "width " : "widths ") + Widths.words(above)
+                        + ". Certificates and laws were.");
+            }
+        }
+    }
+
+    /** Adds one line for each strategy of each experiment that has such cells. */
+    private void cells(List<String> lines, String what, Predicate<CellFigures> such) {
+        for (Experiment experiment : results.study().experiments()) {
+            for (StrategyChoice choice : experiment.strategies()) {
+                List<Integer> widths = results.summary().cells().stream()
+                        .filter(c -> c.cell().experiment().equals(experiment.id())
+                                && c.cell().label().equals(choice.label())
+                                && such.test(c))
+                        .map(c -> c.cell().width())
+                        .toList();
+                if (!widths.isEmpty()) {
+                    lines.add(what + ": " + experiment.id() + ", " + choice.label() + ", "
+                            + (widths.size() == 1 ? "width " : "widths ") + Widths.words(widths) + ".");
+                }
+            }
         }
     }
 }

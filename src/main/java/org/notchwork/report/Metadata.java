@@ -19,7 +19,8 @@ import org.apache.pdfbox.pdmodel.interactive.viewerpreferences.PDViewerPreferenc
 import org.notchwork.bundle.Environment;
 
 /**
- * Makes a document self-contained in the sense of PDF/A-2b (ISO 19005-2): colour profile, metadata, fixed identity.
+ * Makes a document self-contained and accessible in the sense of PDF/A-2a (ISO 19005-2) and PDF/UA-1 (ISO 14289-1):
+ * colour profile, metadata, fixed identity.
  *
  * <p>The colour profile is embedded as it stands; the usual way through the platform's colour classes changes its
  * bytes between Java versions.
@@ -27,6 +28,25 @@ import org.notchwork.bundle.Environment;
 final class Metadata {
 
     private static final String PRODUCER = "notchwork";
+
+    /** Describes the one property that PDF/A does not know: ISO 19005-2, 6.6.2.3.3 asks for it. */
+    private static final String EXTENSION = """
+            <rdf:Description rdf:about="" xmlns:pdfaExtension="http://www.aiim.org/pdfa/ns/extension/"
+             xmlns:pdfaSchema="http://www.aiim.org/pdfa/ns/schema#"
+             xmlns:pdfaProperty="http://www.aiim.org/pdfa/ns/property#">
+            <pdfaExtension:schemas><rdf:Bag><rdf:li rdf:parseType="Resource">
+            <pdfaSchema:schema>PDF/UA identification schema</pdfaSchema:schema>
+            <pdfaSchema:namespaceURI>http://www.aiim.org/pdfua/ns/id/</pdfaSchema:namespaceURI>
+            <pdfaSchema:prefix>pdfuaid</pdfaSchema:prefix>
+            <pdfaSchema:property><rdf:Seq><rdf:li rdf:parseType="Resource">
+            <pdfaProperty:name>part</pdfaProperty:name>
+            <pdfaProperty:valueType>Integer</pdfaProperty:valueType>
+            <pdfaProperty:category>internal</pdfaProperty:category>
+            <pdfaProperty:description>part of ISO 14289 that the file conforms to</pdfaProperty:description>
+            </rdf:li></rdf:Seq></pdfaSchema:property>
+            </rdf:li></rdf:Bag></pdfaExtension:schemas>
+            </rdf:Description>
+            """;
 
     private Metadata() {}
 
@@ -78,13 +98,14 @@ final class Metadata {
                 + " xmlns:rdf=\"http://www.w3.org/1999/02/22-rdf-syntax-ns#\">\n"
                 + "<rdf:Description rdf:about=\"\" xmlns:pdfaid=\"http://www.aiim.org/pdfa/ns/id/\""
                 + " xmlns:dc=\"http://purl.org/dc/elements/1.1/\" xmlns:xmp=\"http://ns.adobe.com/xap/1.0/\""
-                + " xmlns:pdf=\"http://ns.adobe.com/pdf/1.3/\">\n"
-                + "<pdfaid:part>2</pdfaid:part><pdfaid:conformance>B</pdfaid:conformance>\n"
+                + " xmlns:pdf=\"http://ns.adobe.com/pdf/1.3/\" xmlns:pdfuaid=\"http://www.aiim.org/pdfua/ns/id/\">\n"
+                + "<pdfaid:part>2</pdfaid:part><pdfaid:conformance>A</pdfaid:conformance>\n"
+                + "<pdfuaid:part>1</pdfuaid:part>\n"
                 + "<dc:title><rdf:Alt><rdf:li xml:lang=\"x-default\">" + xml(title) + "</rdf:li></rdf:Alt></dc:title>\n"
                 + "<xmp:CreateDate>" + seconds + "</xmp:CreateDate><xmp:ModifyDate>" + seconds + "</xmp:ModifyDate>\n"
                 + "<xmp:CreatorTool>" + xml(environment.program()) + "</xmp:CreatorTool>\n"
                 + "<pdf:Producer>" + PRODUCER + "</pdf:Producer>\n"
-                + "</rdf:Description></rdf:RDF></x:xmpmeta>\n<?xpacket end=\"w\"?>";
+                + "</rdf:Description>\n" + EXTENSION + "</rdf:RDF></x:xmpmeta>\n<?xpacket end=\"w\"?>";
     }
 
     private static String xml(String text) {

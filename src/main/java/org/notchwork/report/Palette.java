@@ -54,8 +54,8 @@ final class Palette {
                 : new BasicStroke(1.6f, BasicStroke.CAP_BUTT, BasicStroke.JOIN_ROUND, 1, dash, 0);
     }
 
-    /** The stroke of a law: thinner than any observation, dotted. */
+    /** The stroke of a law: thinner than any observation, in short dashes. */
     static BasicStroke law() {
-        return new BasicStroke(0.7f, BasicStroke.CAP_BUTT, BasicStroke.JOIN_ROUND, 1, new float[] {1, 1.6f}, 0);
+        return new BasicStroke(0.8f, BasicStroke.CAP_BUTT, BasicStroke.JOIN_ROUND, 1, new float[] {3, 2}, 0);
     }
 }

@@ -3,9 +3,7 @@ package org.notchwork.report;
 import java.awt.BasicStroke;
 import java.awt.Color;
 import java.awt.Font;
-import java.awt.FontFormatException;
 import java.io.IOException;
-import java.io.InputStream;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -13,7 +11,6 @@ import org.apache.pdfbox.pdmodel.PDDocument;
 import org.apache.pdfbox.pdmodel.graphics.form.PDFormXObject;
 import org.knowm.xchart.XYChart;
 import org.knowm.xchart.XYSeries;
-import org.knowm.xchart.style.Styler;
 import org.knowm.xchart.style.XYStyler;
 import org.knowm.xchart.style.markers.SeriesMarkers;
 import org.notchwork.catalogue.Laws;
@@ -30,7 +27,13 @@ import org.notchwork.study.StrategyChoice;
 final class QueryChart {
 
     private static final int WIDTH = 900;
-    private static final int HEIGHT = 520;
+    private static final int HEIGHT = 440;
+    private static final int LEGEND_INSET = 70;
+    private static final int FOOT = 8;
+
+    /** Half the length of the mark of a law where there is one width only. */
+    private static final double MARK = 0.4;
+
     private static final int PLAIN_POWERS = 16;
     private static final double SPREAD = 0.22;
     private static final String SUPERSCRIPTS = "⁰¹²³⁴⁵⁶⁷⁸⁹";
@@ -38,22 +41,54 @@ final class QueryChart {
     private final Experiment experiment;
     private final List<CellFigures> cells;
     private final XYChart chart = new XYChart(WIDTH, HEIGHT);
+    private final Font font = ChartFont.load();
+    private final ChartLegend legend;
     private double highest = 1;
 
     QueryChart(Experiment experiment, List<CellFigures> cells) {
         this.experiment = experiment;
         this.cells = List.copyOf(cells);
+        boolean laws = experiment.strategies().stream().anyMatch(s -> law(s).isPresent());
+        List<String> labels =
+                experiment.strategies().stream().map(QueryChart::label).toList();
+        this.legend = new ChartLegend(labels, laws, font.deriveFont(13f), WIDTH - LEGEND_INSET);
+    }
+
+    /** Returns the height of the chart on the page, legend included, in points. */
+    float height() {
+        return (HEIGHT + legend.height() + FOOT) * Flow.MEASURE / WIDTH;
+    }
+
+    /** Returns in words what the chart shows, for those who cannot see it. */
+    String words() {
+        return "Chart: mean queries of a trial against width, for experiment " + experiment.id() + " at widths "
+                + Widths.words(experiment.widths()) + ". Strategies: "
+                + String.join(
+                        ", ",
+                        experiment.strategies().stream().map(QueryChart::label).toList())
+                + ". Every number of the chart stands in the tables that follow.";
     }
 
     /** Returns the chart as a drawing of vectors and text in the report's own font. */
     PDFormXObject draw(PDDocument document, Fonts fonts) throws IOException {
         List<StrategyChoice> choices = experiment.strategies();
         for (int i = 0; i < choices.size(); i++) {
-            law(i, choices.get(i));
+            curve(i, choices.get(i));
             observed(i, choices.get(i), shift(i, choices.size()));
         }
         style();
-        return ChartCanvas.draw(document, fonts, WIDTH, HEIGHT, g -> chart.paint(g, WIDTH, HEIGHT));
+        return ChartCanvas.draw(document, fonts, font, WIDTH, HEIGHT + legend.height() + FOOT, g -> {
+            chart.paint(g, WIDTH, HEIGHT);
+            legend.paint(g, LEGEND_INSET, HEIGHT);
+        });
+    }
+
+    private static String label(StrategyChoice choice) {
+        return choice.label() + choice.sight().map(s -> " (" + s + ")").orElse("");
+    }
+
+    private Optional<QueryLaw> law(StrategyChoice choice) {
+        return Laws.law(experiment.problem().kind(), choice.strategy().name());
     }
 
     private static double shift(int series, int all) {
@@ -80,8 +115,7 @@ final class QueryChart {
                 bars.add(Double.NaN);
             }
         }
-        String sight = choice.sight().map(s -> " (" + s + ")").orElse("");
-        XYSeries line = chart.addSeries(choice.label() + sight, widths, means);
+        XYSeries line = chart.addSeries(choice.label(), widths, means);
         line.setMarker(Palette.marker(series));
         line.setMarkerColor(Palette.color(series));
         line.setLineColor(Palette.color(series));
@@ -91,10 +125,9 @@ final class QueryChart {
         }
     }
 
-    private void law(int series, StrategyChoice choice) {
-        Optional<QueryLaw> law =
-                Laws.law(experiment.problem().kind(), choice.strategy().name());
-        if (law.isEmpty() || experiment.widths().size() < 2) {
+    private void curve(int series, StrategyChoice choice) {
+        Optional<QueryLaw> law = law(choice);
+        if (law.isEmpty()) {
             return;
         }
         List<Double> widths = new ArrayList<>();
@@ -105,12 +138,15 @@ final class QueryChart {
             widths.add((double) width);
             means.add(log2(law.get().mean(width).value().doubleValue()));
         }
+        if (from == to) {
+            widths = List.of(from - MARK, from + MARK);
+            means = List.of(means.get(0), means.get(0));
+        }
         hidden("law " + series, widths, means, Palette.color(series), Palette.law());
     }
 
     private void hidden(String name, List<Double> x, List<Double> y, Color color, BasicStroke stroke) {
         XYSeries line = chart.addSeries(name, x, y);
-        line.setShowInLegend(false);
         line.setMarker(SeriesMarkers.NONE);
         line.setLineColor(color);
         line.setLineStyle(stroke);
@@ -124,22 +160,17 @@ final class QueryChart {
 
     private void style() {
         XYStyler styler = chart.getStyler();
-        Font font = font();
         chart.setXAxisTitle("width n (input bits)");
         chart.setYAxisTitle("mean queries of a trial (axis of powers of two)");
         styler.setAxisTitleFont(font.deriveFont(15f));
         styler.setAxisTickLabelsFont(font.deriveFont(14f));
-        styler.setLegendFont(font.deriveFont(12f));
         styler.setBaseFont(font.deriveFont(13f));
         styler.setChartTitleVisible(false);
         styler.setChartBackgroundColor(Color.WHITE);
         styler.setPlotBorderVisible(false);
         styler.setPlotGridLinesColor(new Color(0xdddddd));
         styler.setPlotGridLinesStroke(new BasicStroke(0.6f));
-        styler.setLegendPosition(Styler.LegendPosition.OutsideE);
-        styler.setLegendLayout(Styler.LegendLayout.Vertical);
-        styler.setLegendBorderColor(Color.WHITE);
-        styler.setLegendSeriesLineLength(34);
+        styler.setLegendVisible(false);
         styler.setMarkerSize(8);
         styler.setAntiAlias(true);
         styler.setYAxisMin(0.0);
@@ -169,13 +200,5 @@ final class QueryChart {
 
     private static boolean isWhole(double value) {
         return Math.abs(value - Math.rint(value)) < 1e-9;
-    }
-
-    private static Font font() {
-        try (InputStream in = Fonts.open("DejaVuSans.ttf")) {
-            return Font.createFont(Font.TRUETYPE_FONT, in);
-        } catch (FontFormatException | IOException e) {
-            throw new IllegalStateException("the chart's font cannot be used on this machine: " + e.getMessage(), e);
-        }
     }
 }

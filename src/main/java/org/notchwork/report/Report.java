@@ -31,11 +31,12 @@ public final class Report {
                 new CoverSection(results, seal, environment).set(flow);
                 new ClaimsSection(results.claims()).set(flow);
                 new FiguresSection(results).set(flow);
-                new ChecksSection(results).set(flow);
+                new RatiosSection(results).set(flow);
+                new CalibrationSection(results.checks()).set(flow);
+                new ChecksSection(results.checks()).set(flow);
                 new LimitsSection(results).set(flow);
-                String shortTitle = title.length() <= FOOT_TITLE ? title : title.substring(0, FOOT_TITLE) + "…";
-                flow.finish(
-                        "seal " + seal.substring(0, FOOT_SEAL) + "… · " + environment.program() + " · " + shortTitle);
+                flow.finish("seal " + seal.substring(0, FOOT_SEAL) + "… · " + Printable.escape(environment.program())
+                        + " · " + Printable.cut(title, FOOT_TITLE));
             }
             Metadata.add(document, title, seal, environment);
             ByteArrayOutputStream bytes = new ByteArrayOutputStream();
