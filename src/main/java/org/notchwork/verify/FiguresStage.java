@@ -17,12 +17,12 @@ final class FiguresStage {
     private FiguresStage() {}
 
     static StageReport report(OpenedFiles files, LinePass pass) {
-        if (!pass.isComplete()) {
+        if (pass.misplacement().isPresent()) {
             return StageReport.of(
                     Stage.FIGURES,
                     pass.misplaced(),
                     "",
-                    "a line is not the one that the study calls for at its place; the lines after it were not read");
+                    pass.misplacement().get().sentence());
         }
         Findings findings = new Findings();
         Summary summary = pass.figures().summary();
