@@ -56,8 +56,8 @@ final class CheckComparison {
             String found = i < written.size()
                     ? name(new CrossChecker.Called(
                             written.get(i).kind(), written.get(i).subject()))
-                    : "(absent)";
-            String right = i < called.size() ? name(called.get(i)) : "(absent)";
+                    : "(nothing)";
+            String right = i < called.size() ? name(called.get(i)) : "(nothing)";
             if (!found.equals(right)) {
                 String pointer = i < written.size() ? "/checks/" + all.indexOf(written.get(i)) : "/checks";
                 findings.add(new Finding(FILE, OptionalLong.empty(), pointer, found, right));
