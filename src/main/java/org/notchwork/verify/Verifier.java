@@ -91,7 +91,8 @@ public final class Verifier {
         reports.add(StageReport.of(
                 Stage.SCHEMA,
                 StageOutcome.PASSED,
-                "all files canonical and of their format, " + pass.tree().size() + " trial lines"));
+                "all JSON files are canonical and name their format; no fault in study, seal, cross-checks, environment and "
+                        + pass.tree().size() + " trial lines"));
         reports.add(SealStage.report(files, bag, pass, options.expect()));
         reports.add(pass.certificates().report());
         reports.add(FiguresStage.report(files, pass));

@@ -14,6 +14,8 @@ import org.junit.jupiter.params.provider.EnumSource;
 import org.notchwork.Studies;
 import org.notchwork.bundle.Limits;
 import org.notchwork.check.CheckKind;
+import org.notchwork.check.CheckOutcome;
+import org.notchwork.check.CrossCheck;
 import org.notchwork.problem.Counts;
 import org.notchwork.seed.Seed;
 import org.notchwork.trial.TrialRecord;
@@ -119,7 +121,10 @@ class ForgedRunTest {
     @EnumSource(CheckKind.class)
     void aCrossCheckLeftOutIsMissedWithoutAReRun(CheckKind kind) throws Exception {
         Path bundle = BundleFixture.copy(good, folder.resolve("left-out"));
-        Forger.leaveOut(bundle, Studies.small(), kind);
+        Forger.checks(
+                bundle,
+                Studies.small(),
+                checks -> checks.stream().filter(c -> c.kind() != kind).toList());
         Verdict verdict = BundleFixture.verify(bundle);
         assertEquals(10, verdict.exitCode(), verdict.sentence());
         StageReport figures = verdict.stages().get(5);
@@ -129,6 +134,39 @@ class ForgedRunTest {
         if (kind.needsInstances()) {
             assertTrue(first.text().contains(kind.word() + " of "), first.text());
         }
+    }
+
+    /** An outcome turned, with all that counts it made anew: from the lines if they are enough, else by a re-run. */
+    @ParameterizedTest
+    @EnumSource(CheckKind.class)
+    void aTurnedOutcomeOfACrossCheckIsFoundAndNamed(CheckKind kind) throws Exception {
+        Path bundle = BundleFixture.copy(good, folder.resolve("turned"));
+        Forger.checks(
+                bundle,
+                Studies.small(),
+                checks -> checks.stream()
+                        .map(c -> c.kind() == kind && c.outcome() == CheckOutcome.AGREES ? turned(c) : c)
+                        .toList());
+        assertEquals(
+                kind.needsInstances() ? 0 : 10, BundleFixture.verify(bundle).exitCode());
+        Verdict verdict = BundleFixture.verify(bundle, new Rerun.All());
+        assertEquals(10, verdict.exitCode());
+        Finding first =
+                verdict.stages().get(kind.needsInstances() ? 6 : 5).findings().get(0);
+        assertTrue(first.pointer().matches("/checks/[0-9]+/outcome"), first.text());
+        assertEquals("\"not-comparable\"", first.written());
+        assertEquals("\"agrees\"", first.right());
+    }
+
+    private static CrossCheck turned(CrossCheck c) {
+        return new CrossCheck(
+                c.kind(),
+                c.subject(),
+                c.compared(),
+                c.expected(),
+                c.observed(),
+                c.standardErrors(),
+                CheckOutcome.NOT_COMPARABLE);
     }
 
     private static UnaryOperator<TrialRecord> calls(int fewerClassical, int fewerQuantum) {

@@ -14,7 +14,6 @@ import org.notchwork.bundle.CrossChecksFile;
 import org.notchwork.bundle.Layout;
 import org.notchwork.bundle.SummaryFile;
 import org.notchwork.bundle.TrialLine;
-import org.notchwork.check.CheckKind;
 import org.notchwork.check.CrossCheck;
 import org.notchwork.check.CrossChecker;
 import org.notchwork.check.LineChecks;
@@ -76,12 +75,14 @@ final class Forger {
         Files.write(file(bundle, Layout.CLAIMS), CanonicalJson.bytes(ClaimsFile.write(Judge.judge(study, summary))));
     }
 
-    /** Leaves out every check of a kind, and makes what counts them anew. */
-    static void leaveOut(Path bundle, Study study, CheckKind kind) throws IOException, JsonFault {
+    /** Changes the list of checks, and makes what counts them anew. */
+    static void checks(Path bundle, Study study, UnaryOperator<List<CrossCheck>> change) throws IOException, JsonFault {
         List<CrossCheck> checks = new ArrayList<>(
                 CrossChecksFile.read(json(Files.readAllBytes(file(bundle, Layout.CROSS_CHECKS))), new ArrayList<>()));
-        if (!checks.removeIf(c -> c.kind() == kind)) {
-            throw new IllegalStateException("there is no check of kind " + kind);
+        List<CrossCheck> before = List.copyOf(checks);
+        checks = change.apply(checks);
+        if (checks.equals(before)) {
+            throw new IllegalStateException("no check was changed");
         }
         SummaryBuilder figures = new SummaryBuilder(study);
         for (Experiment e : study.experiments()) {
