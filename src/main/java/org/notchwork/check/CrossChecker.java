@@ -65,6 +65,39 @@ public final class CrossChecker {
         return checks;
     }
 
+    /**
+     * What a check is about, known before it is made.
+     *
+     * @param kind what is checked
+     * @param subject on what
+     */
+    public record Called(CheckKind kind, String subject) {}
+
+    /** Returns which checks that need the instances the study calls for, in the order of {@link #all}. */
+    public List<Called> onInstances() {
+        List<Called> called = new ArrayList<>();
+        for (Experiment experiment : study.experiments()) {
+            for (int width : experiment.widths()) {
+                if (isExhaustive(study, width)) {
+                    onInstances(experiment, width, called);
+                }
+            }
+        }
+        return called;
+    }
+
+    private static void onInstances(Experiment experiment, int width, List<Called> called) {
+        String subject = subject(experiment.id(), width);
+        called.add(new Called(CheckKind.PROMISE, subject));
+        called.add(new Called(CheckKind.EXHAUSTIVE_ANSWER, subject));
+        onAllSecrets(experiment)
+                .forEach(choice -> called.add(
+                        new Called(CheckKind.ALL_SECRETS, new Cell(experiment.id(), width, choice.label()).id())));
+        if (hasEngines(experiment)) {
+            called.add(new Called(CheckKind.ENGINES, subject));
+        }
+    }
+
     /** Returns how a check of a whole width is called: {@code EXPERIMENT/WIDTH}. */
     public static String subject(String experiment, int width) {
         return experiment + "/" + width;
@@ -83,16 +116,13 @@ public final class CrossChecker {
                 tally.answers(),
                 "the hidden answer of every instance and every answer given equal what search finds"));
         AllSecrets allSecrets = new AllSecrets(new SeedTree(study.seed()));
-        for (StrategyChoice choice : experiment.strategies()) {
-            Optional<QueryLaw> law = law(experiment, choice);
-            if (choice.strategy() instanceof ClassicalStrategy classical
-                    && classical.deterministic()
-                    && law.isPresent()) {
-                String cell = new Cell(experiment.id(), width, choice.label()).id();
-                checks.add(allSecrets.check(experiment, width, cell, classical, law.get()));
-            }
+        for (StrategyChoice choice : onAllSecrets(experiment)) {
+            String cell = new Cell(experiment.id(), width, choice.label()).id();
+            ClassicalStrategy strategy = (ClassicalStrategy) choice.strategy();
+            checks.add(allSecrets.check(
+                    experiment, width, cell, strategy, law(experiment, choice).orElseThrow()));
         }
-        if (experiment.strategies().stream().anyMatch(s -> s.engine().isPresent())) {
+        if (hasEngines(experiment)) {
             checks.add(check(
                     CheckKind.ENGINES,
                     subject,
@@ -100,6 +130,18 @@ public final class CrossChecker {
                     "every engine gives 2^(1-n) to each word orthogonal to the period and 0 to the others, exactly"
                             + sample(experiment, width)));
         }
+    }
+
+    /** Returns the strategies whose closed form holds for every secret, so that all are run. */
+    private static List<StrategyChoice> onAllSecrets(Experiment experiment) {
+        return experiment.strategies().stream()
+                .filter(c -> c.strategy() instanceof ClassicalStrategy s && s.deterministic())
+                .filter(c -> law(experiment, c).isPresent())
+                .toList();
+    }
+
+    private static boolean hasEngines(Experiment experiment) {
+        return experiment.strategies().stream().anyMatch(s -> s.engine().isPresent());
     }
 
     private static String sample(Experiment experiment, int width) {

@@ -4,9 +4,7 @@ import java.io.IOException;
 import java.nio.file.Path;
 import java.security.SecureRandom;
 import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
-import java.util.regex.Pattern;
 import org.apache.commons.cli.CommandLine;
 import org.apache.commons.cli.Options;
 import org.apache.commons.codec.binary.Hex;
@@ -23,7 +21,6 @@ import org.notchwork.verify.VerifyOptions;
 /** Checks a bundle and says what it proves. */
 final class VerifyVerb implements Verb {
 
-    private static final Pattern SEAL = Pattern.compile("[0-9a-f]{40,64}");
     private static final int MOST_SAMPLED = 1_000_000;
 
     @Override
@@ -98,7 +95,11 @@ final class VerifyVerb implements Verb {
                 }
             }
         }
-        terminal.out().println("not covered   environment.json, report.pdf and README.txt are not under the seal");
+        if (!verdict.notCovered().isEmpty()) {
+            terminal.out()
+                    .println("not covered   not under the seal, of these only the digests were compared: "
+                            + String.join(", ", verdict.notCovered()));
+        }
         terminal.out().println(verdict.sentence());
     }
 
@@ -126,14 +127,13 @@ final class VerifyVerb implements Verb {
         if (text == null) {
             return Optional.empty();
         }
-        String plain = text.replaceAll("\\s", "").toLowerCase(Locale.ROOT);
-        if (!SEAL.matcher(plain).matches()) {
+        if (!VerifyOptions.isSeal(text)) {
             throw new Refusal(
                     Exit.USAGE,
                     "--expect: 40 to 64 hexadecimal digits are wanted; fewer prove nothing against an author who could"
                             + " prepare two bundles with one short seal");
         }
-        return Optional.of(plain);
+        return Optional.of(text);
     }
 
     private static Rerun rerun(CommandLine line) throws Refusal {

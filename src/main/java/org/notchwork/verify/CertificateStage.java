@@ -1,12 +1,12 @@
 package org.notchwork.verify;
 
+import java.util.Optional;
 import java.util.OptionalLong;
 import org.notchwork.check.CertificateCheck;
 import org.notchwork.problem.Answer;
 import org.notchwork.problem.Instance;
 import org.notchwork.study.Experiment;
 import org.notchwork.trial.Outcome;
-import org.notchwork.trial.TrialGroup;
 import org.notchwork.trial.TrialRecord;
 import org.notchwork.trial.TrialRunner;
 
@@ -15,18 +15,32 @@ final class CertificateStage {
 
     private final TrialRunner runner;
     private final Findings findings = new Findings();
+    private Optional<Drawn> last = Optional.empty();
     private long checked;
+
+    private record Drawn(String experiment, long trial, Instance instance) {}
 
     CertificateStage(TrialRunner runner) {
         this.runner = runner;
     }
 
-    /** Checks one instance's lines, which begin at a line of a file. */
-    void check(Experiment experiment, TrialGroup group, String path, long firstLine) {
-        Instance instance = runner.instance(experiment, group.width(), group.trial());
-        for (int i = 0; i < group.records().size(); i++) {
-            check(experiment, instance, group.records().get(i), path, firstLine + i);
+    /** Checks a line; passes over a trial that the study does not call for, whose instance could not be drawn. */
+    void check(Experiment experiment, TrialRecord record, String path, long line) {
+        int width = record.cell().width();
+        if (Lines.calls(experiment, width, record.trial())) {
+            check(experiment, instance(experiment, width, record.trial()), record, path, line);
         }
+    }
+
+    /** The lines of an instance follow each other, so that it is drawn once. */
+    private Instance instance(Experiment experiment, int width, long trial) {
+        Optional<Drawn> same = last.filter(d -> d.trial() == trial
+                && d.instance().function().width() == width
+                && d.experiment().equals(experiment.id()));
+        Drawn drawn =
+                same.orElseGet(() -> new Drawn(experiment.id(), trial, runner.instance(experiment, width, trial)));
+        last = Optional.of(drawn);
+        return drawn.instance();
     }
 
     private void check(Experiment experiment, Instance instance, TrialRecord record, String path, long line) {
@@ -64,11 +78,12 @@ final class CertificateStage {
         return ((Answer.Period) answer).s().hex();
     }
 
-    Findings findings() {
-        return findings;
-    }
-
-    long checked() {
-        return checked;
+    /** Returns the report, once all lines were checked. */
+    StageReport report() {
+        return StageReport.of(
+                Stage.CERTIFICATES,
+                findings,
+                checked + " answers proved on instances drawn again from the seed",
+                "an answer or its certificate does not hold");
     }
 }

@@ -5,6 +5,7 @@ import java.util.OptionalLong;
 import org.notchwork.bundle.CrossChecksFile;
 import org.notchwork.bundle.Layout;
 import org.notchwork.check.CrossCheck;
+import org.notchwork.check.CrossChecker;
 
 /** Compares written cross-checks with recomputed ones, in order; differences are named by their place in the file. */
 final class CheckComparison {
@@ -38,5 +39,34 @@ final class CheckComparison {
                             findings.add(new Finding(FILE, OptionalLong.empty(), pointer + below, found, right)))
                     .compare(CrossChecksFile.write(written.get(i)), CrossChecksFile.write(recomputed.get(i)));
         }
+    }
+
+    /**
+     * Compares which checks on instances are written with those that the study calls for; not what they found.
+     *
+     * @param findings where differences are noted
+     * @param all all checks of the file
+     * @param called those on instances that the study calls for, in order
+     */
+    static void names(Findings findings, List<CrossCheck> all, List<CrossChecker.Called> called) {
+        List<CrossCheck> written =
+                all.stream().filter(c -> c.kind().needsInstances()).toList();
+        int longer = Math.max(written.size(), called.size());
+        for (int i = 0; i < longer; i++) {
+            String found = i < written.size()
+                    ? name(new CrossChecker.Called(
+                            written.get(i).kind(), written.get(i).subject()))
+                    : "(nothing)";
+            String right = i < called.size() ? name(called.get(i)) : "(nothing)";
+            if (!found.equals(right)) {
+                String pointer = i < written.size() ? "/checks/" + all.indexOf(written.get(i)) : "/checks";
+                findings.add(new Finding(FILE, OptionalLong.empty(), pointer, found, right));
+                return;
+            }
+        }
+    }
+
+    private static String name(CrossChecker.Called called) {
+        return called.kind().word() + " of " + called.subject();
     }
 }

@@ -17,28 +17,30 @@ final class FiguresStage {
     private FiguresStage() {}
 
     static StageReport report(OpenedFiles files, LinePass pass) {
-        if (!pass.isComplete()) {
+        if (pass.misplacement().isPresent()) {
             return StageReport.of(
                     Stage.FIGURES,
                     pass.misplaced(),
                     "",
-                    "a line is not the one that the study calls for at its place; the lines after it were not read");
+                    pass.misplacement().get().sentence());
         }
         Findings findings = new Findings();
         Summary summary = pass.figures().summary();
         compare(findings, Layout.SUMMARY, files, SummaryFile.write(summary, files.checks()));
         compare(findings, Layout.CLAIMS, files, ClaimsFile.write(Judge.judge(files.study(), summary)));
-        List<CrossCheck> recomputed = new CrossChecker(files.study()).fromLines(pass.lineChecks(), summary);
+        CrossChecker checker = new CrossChecker(files.study());
+        List<CrossCheck> recomputed = checker.fromLines(pass.lineChecks(), summary);
         List<CrossCheck> written =
                 files.checks().stream().filter(c -> !c.kind().needsInstances()).toList();
         CheckComparison.compare(findings, files.checks(), written, recomputed);
+        CheckComparison.names(findings, files.checks(), checker.onInstances());
         int rest = files.checks().size() - recomputed.size();
         return StageReport.of(
                 Stage.FIGURES,
                 findings,
                 "recomputed: identical: " + summary.cells().size() + " cells, "
                         + files.study().claims().size() + " claims, " + recomputed.size()
-                        + " cross-checks from the lines; " + rest + " cross-checks need --rerun all",
+                        + " cross-checks from the lines; " + rest + " cross-checks are there that need --rerun all",
                 "recomputed: different");
     }
 

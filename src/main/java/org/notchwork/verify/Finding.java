@@ -17,6 +17,7 @@ import org.notchwork.json.Printable;
 public record Finding(String file, OptionalLong line, String pointer, String written, String right) {
 
     private static final int SHOWN = 160;
+    private static final int POINTER_SHOWN = 200;
 
     /** Returns a finding about a whole file. */
     public static Finding of(String file, String written, String right) {
@@ -27,7 +28,7 @@ public record Finding(String file, OptionalLong line, String pointer, String wri
     public String text() {
         String place = file
                 + (line.isPresent() ? ", line " + line.getAsLong() : "")
-                + (pointer.isEmpty() ? "" : ", " + pointer);
+                + (pointer.isEmpty() ? "" : ", " + Printable.cut(pointer, POINTER_SHOWN));
         return Printable.escape(place + ": found " + shown(written) + ", should be " + shown(right));
     }
 
@@ -36,7 +37,7 @@ public record Finding(String file, OptionalLong line, String pointer, String wri
         JsonObject.Builder json = JsonObject.builder()
                 .put("file", Printable.escape(file))
                 .put("found", Printable.escape(shown(written)))
-                .put("pointer", Printable.escape(pointer))
+                .put("pointer", Printable.escape(Printable.cut(pointer, POINTER_SHOWN)))
                 .put("should-be", Printable.escape(shown(right)));
         Optional<Long> number = line.isPresent() ? Optional.of(line.getAsLong()) : Optional.empty();
         number.ifPresent(n -> json.put("line", n));

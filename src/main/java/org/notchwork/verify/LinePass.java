@@ -34,6 +34,9 @@ import org.notchwork.trial.TrialRunner;
 /**
  * One pass over all trial lines that feeds every stage that reads them: form, tree, certificates, figures. Memory does
  * not grow with the number of lines. The bytes are hashed as they pass, so that what was checked is what was hashed.
+ *
+ * <p>Where a line is not the one that the study calls for, the figures end; form, tree and certificates go on to the
+ * last line.
  */
 final class LinePass {
 
@@ -47,6 +50,7 @@ final class LinePass {
     private final SummaryBuilder figures;
     private final LineChecks lineChecks;
     private final Findings misplaced = new Findings();
+    private Optional<Misplacement> misplacement = Optional.empty();
 
     LinePass(Study study, Bag bag, int lineLimit, TrialRunner runner) {
         this.study = study;
@@ -65,21 +69,21 @@ final class LinePass {
         void read();
     }
 
-    /** Reads all lines; stops early where a line is not the one that the study calls for. */
+    /** Reads all lines of all files. */
     void run(Listener listener) throws IOException, BundleFault, OpenedFiles.Malformed, InterruptedException {
         for (Experiment experiment : study.experiments()) {
             String path = Layout.DATA + Layout.trials(experiment.id());
             MessageDigest digest = Digests.sha256();
             try (InputStream in = new DigestInputStream(bag.open(path), digest);
                     LineReader lines = new LineReader(in, path, lineLimit)) {
-                if (!read(experiment, lines, path, listener)) {
-                    return;
-                }
+                boolean inPlace = misplacement.isEmpty() && read(experiment, lines, path, listener);
+                rest(experiment, lines, path, inPlace);
             }
             digests.put(Layout.trials(experiment.id()), Digests.text(digest.digest()));
         }
     }
 
+    /** Reads the lines that the study calls for; returns false after the first that is another or is missing. */
     private boolean read(Experiment experiment, LineReader lines, String path, Listener listener)
             throws IOException, BundleFault, OpenedFiles.Malformed, InterruptedException {
         for (int width : experiment.widths()) {
@@ -93,41 +97,62 @@ final class LinePass {
                 listener.read();
             }
         }
-        if (lines.next().isPresent()) {
-            misplaced.add(
-                    new Finding(path, OptionalLong.of(lines.number()), "", "one more line", "the end of the file"));
-            return false;
-        }
         return true;
     }
 
     private boolean group(Experiment experiment, int width, long trial, LineReader lines, String path)
             throws IOException, BundleFault, OpenedFiles.Malformed {
         List<TrialRecord> records = new ArrayList<>();
-        long firstLine = lines.number() + 1;
         for (StrategyChoice choice : experiment.strategies()) {
+            Misplacement.Place place = new Misplacement.Place(experiment, width, trial, choice.label());
             Optional<byte[]> line = lines.next();
             if (line.isEmpty()) {
                 misplaced.add(new Finding(
-                        path,
-                        OptionalLong.of(lines.number() + 1),
-                        "",
-                        "the end of the file",
-                        "trial " + trial + " of " + choice.label() + " at width " + width));
+                        path, OptionalLong.of(lines.number() + 1), "", "the end of the file", place.text()));
+                misplacement = Optional.of(new Misplacement(path, lines.number() + 1, Optional.of(place)));
                 return false;
             }
-            tree.add(line.get());
-            TrialLine.Read read = parsed(line.get(), experiment, path, lines.number());
+            TrialLine.Read read = take(line.get(), experiment, path, lines.number());
             if (!Expected.isMet(read, width, trial, choice, path, lines.number(), misplaced)) {
+                misplacement =
+                        Optional.of(new Misplacement(path, lines.number(), Optional.of(place)).by(read.record()));
                 return false;
             }
             records.add(read.record());
         }
         TrialGroup group = new TrialGroup(experiment.id(), width, trial, records);
-        certificates.check(experiment, group, path, firstLine);
         figures.add(group);
         lineChecks.add(group);
         return true;
+    }
+
+    /** Reads the lines that are left in a file. */
+    private void rest(Experiment experiment, LineReader lines, String path, boolean inPlace)
+            throws IOException, BundleFault, OpenedFiles.Malformed, InterruptedException {
+        Optional<byte[]> line = lines.next();
+        if (inPlace && line.isPresent()) {
+            misplaced.add(
+                    new Finding(path, OptionalLong.of(lines.number()), "", "one more line", "the end of the file"));
+            misplacement = Optional.of(new Misplacement(path, lines.number(), Optional.empty()));
+        }
+        while (line.isPresent()) {
+            if (Thread.interrupted()) {
+                throw new InterruptedException();
+            }
+            take(line.get(), experiment, path, lines.number());
+            line = lines.next();
+        }
+        long count = lines.number();
+        misplacement = misplacement.map(m -> m.path().equals(path) ? m.in(count, Lines.of(experiment)) : m);
+    }
+
+    /** Takes a line, wherever it stands: its form, its leaf of the tree, its certificate. */
+    private TrialLine.Read take(byte[] line, Experiment experiment, String path, long number)
+            throws OpenedFiles.Malformed {
+        TrialLine.Read read = parsed(line, experiment, path, number);
+        tree.add(line);
+        certificates.check(experiment, read.record(), path, number);
+        return read;
     }
 
     private TrialLine.Read parsed(byte[] line, Experiment experiment, String path, long number)
@@ -143,24 +168,19 @@ final class LinePass {
         }
     }
 
-    /** Returns whether every line was there and in its place; if not, nothing else was completed. */
-    boolean isComplete() {
-        return misplaced.isEmpty();
+    /** Returns the first line that is not the one that the study calls for; if there is none, the figures are whole. */
+    Optional<Misplacement> misplacement() {
+        return misplacement;
     }
 
-    /** Returns the lines that are not those that the study calls for. */
+    /** Returns the fields in which the first misplaced line is not the one that the study calls for. */
     Findings misplaced() {
         return misplaced;
     }
 
-    /** Returns what is wrong with answers and certificates. */
-    Findings certificateFindings() {
-        return certificates.findings();
-    }
-
-    /** Returns how many certificates were checked. */
-    long certificatesChecked() {
-        return certificates.checked();
+    /** Returns what became of the answers and certificates. */
+    CertificateStage certificates() {
+        return certificates;
     }
 
     MerkleTree tree() {

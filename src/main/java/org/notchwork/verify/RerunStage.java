@@ -1,17 +1,11 @@
 package org.notchwork.verify;
 
 import java.io.IOException;
-import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.OptionalLong;
 import org.notchwork.bundle.Bag;
-import org.notchwork.bundle.BundleFault;
 import org.notchwork.bundle.Layout;
-import org.notchwork.bundle.LineReader;
-import org.notchwork.bundle.TrialLine;
 import org.notchwork.catalogue.Engines;
 import org.notchwork.check.CrossCheck;
 import org.notchwork.check.CrossChecker;
@@ -19,11 +13,6 @@ import org.notchwork.check.InstanceExaminer;
 import org.notchwork.check.InstanceTally;
 import org.notchwork.check.LineChecks;
 import org.notchwork.figure.SummaryBuilder;
-import org.notchwork.json.CanonicalJson;
-import org.notchwork.json.JsonFault;
-import org.notchwork.json.JsonLimits;
-import org.notchwork.json.JsonReader;
-import org.notchwork.json.JsonValue;
 import org.notchwork.study.Experiment;
 import org.notchwork.study.Study;
 import org.notchwork.trial.TrialGroup;
@@ -40,6 +29,9 @@ final class RerunStage {
     private final TrialRunner runner;
     private final InstanceExaminer examiner = new InstanceExaminer(Engines.reference());
     private final Findings findings = new Findings();
+    private final SummaryBuilder figures;
+    private final LineChecks lineChecks;
+    private final Map<String, InstanceTally> examined = new LinkedHashMap<>();
     private long compared;
 
     RerunStage(OpenedFiles files, Bag bag, VerifyOptions options, TrialRunner runner) {
@@ -47,45 +39,22 @@ final class RerunStage {
         this.bag = bag;
         this.options = options;
         this.runner = runner;
+        this.figures = new SummaryBuilder(files.study());
+        this.lineChecks = new LineChecks(files.study());
     }
 
     private record Again(TrialGroup group, InstanceTally examined) {}
 
     /** Runs everything again. An interrupt ends it early, and the report says how far it came. */
-    StageReport all(LinePass.Listener listener) throws IOException, BundleFault {
+    StageReport all(LinePass.Listener listener) throws IOException {
         Study study = files.study();
-        SummaryBuilder figures = new SummaryBuilder(study);
-        LineChecks lineChecks = new LineChecks(study);
-        Map<String, InstanceTally> examined = new LinkedHashMap<>();
-        long lines = files.seal().trials();
         try {
             for (Experiment experiment : study.experiments()) {
-                String path = Layout.DATA + Layout.trials(experiment.id());
-                List<TrialRange> ranges = TrialRange.of(study).stream()
-                        .filter(r -> r.experiment().equals(experiment))
-                        .toList();
-                try (LineReader written =
-                        new LineReader(bag.open(path), path, options.limits().lineBytes())) {
-                    new TrialPool(options.threads()).<Again, Stopped>run(ranges, this::again, (Again again) -> {
-                        compare(experiment, again.group(), written, path);
-                        figures.add(again.group());
-                        lineChecks.add(again.group());
-                        examined.merge(
-                                CrossChecker.subject(
-                                        experiment.id(), again.group().width()),
-                                again.examined(),
-                                InstanceTally::plus);
-                        listener.read();
-                    });
-                }
+                run(experiment, listener);
             }
         } catch (InterruptedException e) {
-            return StageReport.of(
-                    Stage.RERUN,
-                    findings.isEmpty() ? StageOutcome.NOT_FINISHED : StageOutcome.FAILED,
-                    "not finished: " + compared + " of " + lines + " trials re-run, "
-                            + (findings.isEmpty() ? "all equal" : findings.count() + " different"));
-        } catch (Stopped e) {
+            return stopped(compared, Lines.of(study), findings);
+        } catch (WrittenLines.Stopped e) {
             throw new IOException(e.getMessage(), e);
         }
         List<CrossCheck> checks = new CrossChecker(study).all(examined, lineChecks, figures.summary());
@@ -99,54 +68,45 @@ final class RerunStage {
                 "recomputed: different");
     }
 
-    /** Says that the written lines cannot be read on. */
-    private static final class Stopped extends Exception {
-
-        private static final long serialVersionUID = 1L;
-
-        Stopped(Exception cause) {
-            super(cause.getMessage(), cause);
+    private void run(Experiment experiment, LinePass.Listener listener)
+            throws IOException, InterruptedException, WrittenLines.Stopped {
+        String path = Layout.DATA + Layout.trials(experiment.id());
+        List<TrialRange> ranges = TrialRange.of(files.study()).stream()
+                .filter(r -> r.experiment().equals(experiment))
+                .toList();
+        try (WrittenLines written = new WrittenLines(bag, path, options.limits().lineBytes(), findings)) {
+            new TrialPool(options.threads()).<Again, WrittenLines.Stopped>run(ranges, this::again, (Again again) -> {
+                TrialGroup group = again.group();
+                long first = Lines.first(experiment, group.width(), group.trial());
+                for (int i = 0; i < group.records().size(); i++) {
+                    written.compare(
+                            first + i,
+                            group.records().get(i),
+                            experiment.strategies().get(i));
+                    compared++;
+                }
+                figures.add(group);
+                lineChecks.add(group);
+                examined.merge(
+                        CrossChecker.subject(experiment.id(), group.width()), again.examined(), InstanceTally::plus);
+                listener.read();
+            });
         }
     }
 
     private Again again(Experiment experiment, int width, long trial) {
         TrialGroup group = runner.run(experiment, width, trial);
-        InstanceTally examined = CrossChecker.isExhaustive(files.study(), width)
+        InstanceTally examination = CrossChecker.isExhaustive(files.study(), width)
                 ? examiner.examine(experiment, runner.instance(experiment, width, trial), group)
                 : InstanceTally.NONE;
-        return new Again(group, examined);
+        return new Again(group, examination);
     }
 
-    private void compare(Experiment experiment, TrialGroup group, LineReader written, String path) throws Stopped {
-        List<byte[]> lines = new ArrayList<>();
-        for (int i = 0; i < group.records().size(); i++) {
-            lines.add(CanonicalJson.bytes(TrialLine.write(
-                    group.records().get(i), experiment.strategies().get(i))));
-        }
-        try {
-            for (byte[] line : lines) {
-                byte[] found = written.next().orElseGet(() -> new byte[0]);
-                compared++;
-                if (!Arrays.equals(found, line)) {
-                    difference(findings, path, written.number(), found, line);
-                }
-            }
-        } catch (IOException | BundleFault e) {
-            throw new Stopped(e);
-        }
-    }
-
-    /** Notes the fields in which a written line differs from the one computed again. */
-    static void difference(Findings findings, String path, long number, byte[] written, byte[] again) {
-        JsonReader reader = new JsonReader(JsonLimits.LINE);
-        try {
-            JsonValue found = reader.read(written);
-            JsonValue right = reader.read(again);
-            new JsonDifference(
-                            (pointer, a, b) -> findings.add(new Finding(path, OptionalLong.of(number), pointer, a, b)))
-                    .compare(found, right);
-        } catch (JsonFault e) {
-            findings.add(new Finding(path, OptionalLong.of(number), "", "not JSON: " + e.getMessage(), "a trial line"));
-        }
+    /** Returns the report of a re-run that was interrupted. */
+    static StageReport stopped(long compared, long wanted, Findings findings) {
+        String far = "not finished: " + compared + " of " + wanted + " trials re-run, ";
+        return findings.isEmpty()
+                ? StageReport.of(Stage.RERUN, StageOutcome.NOT_FINISHED, far + "all equal")
+                : StageReport.of(Stage.RERUN, findings, "", far + findings.count() + " different");
     }
 }

@@ -1,24 +1,18 @@
 package org.notchwork.verify;
 
 import java.io.IOException;
-import java.math.BigDecimal;
-import java.util.Arrays;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.NavigableSet;
-import java.util.Optional;
 import java.util.TreeSet;
 import org.notchwork.bundle.Bag;
-import org.notchwork.bundle.BundleFault;
 import org.notchwork.bundle.Layout;
-import org.notchwork.bundle.LineReader;
-import org.notchwork.bundle.TrialLine;
 import org.notchwork.catalogue.Engines;
 import org.notchwork.check.CheckOutcome;
+import org.notchwork.check.Comparison;
 import org.notchwork.check.CrossChecker;
 import org.notchwork.check.InstanceExaminer;
 import org.notchwork.check.InstanceTally;
-import org.notchwork.exact.Decimals;
-import org.notchwork.json.CanonicalJson;
 import org.notchwork.problem.Instance;
 import org.notchwork.seed.Address;
 import org.notchwork.seed.RandomStream;
@@ -26,10 +20,15 @@ import org.notchwork.seed.SeedTree;
 import org.notchwork.study.Experiment;
 import org.notchwork.study.StrategyChoice;
 import org.notchwork.trial.TrialGroup;
+import org.notchwork.trial.TrialPool;
+import org.notchwork.trial.TrialRange;
 import org.notchwork.trial.TrialRecord;
 import org.notchwork.trial.TrialRunner;
 
-/** Runs a random sample of trials again, drawn without replacement from the referee's own seed. */
+/**
+ * Runs a random sample of trials again, drawn without replacement from the referee's own seed, and searches the
+ * instances of the sample exhaustively where the study's cross-checks do.
+ */
 final class SampleStage {
 
     private static final Address CHOICE = new Address("referee", 1, 0, "sample");
@@ -38,8 +37,9 @@ final class SampleStage {
     private final Bag bag;
     private final VerifyOptions options;
     private final TrialRunner runner;
+    private final InstanceExaminer examiner = new InstanceExaminer(Engines.reference());
     private final Findings findings = new Findings();
-    private InstanceTally examined = InstanceTally.NONE;
+    private long searched;
     private long compared;
 
     SampleStage(OpenedFiles files, Bag bag, VerifyOptions options, TrialRunner runner) {
@@ -49,36 +49,35 @@ final class SampleStage {
         this.runner = runner;
     }
 
+    private record Again(TrialGroup group, InstanceTally examined) {}
+
     /** Runs the sample. An interrupt ends it early, and the report says how far it came. */
-    StageReport sample(int wanted, LinePass.Listener listener) throws IOException, BundleFault {
-        long all = files.seal().trials();
+    StageReport sample(int wanted, LinePass.Listener listener) throws IOException {
+        long all = Lines.of(files.study());
         NavigableSet<Long> chosen = choose(Math.min(wanted, all), all);
         long offset = 0;
         try {
             for (Experiment experiment : files.study().experiments()) {
-                long lines = (long) experiment.widths().size()
-                        * experiment.trials()
-                        * experiment.strategies().size();
-                run(experiment, chosen.subSet(offset, true, offset + lines, false), offset, listener);
+                long lines = Lines.of(experiment);
+                NavigableSet<Long> here = new TreeSet<>();
+                for (long global : chosen.subSet(offset, true, offset + lines, false)) {
+                    here.add(global - offset);
+                }
+                run(experiment, here, listener);
                 offset += lines;
             }
         } catch (InterruptedException e) {
-            return StageReport.of(
-                    Stage.RERUN,
-                    findings.isEmpty() ? StageOutcome.NOT_FINISHED : StageOutcome.FAILED,
-                    "not finished: " + compared + " of " + chosen.size() + " trials re-run, "
-                            + (findings.isEmpty() ? "all equal" : findings.count() + " different"));
+            return RerunStage.stopped(compared, chosen.size(), findings);
+        } catch (WrittenLines.Stopped e) {
+            throw new IOException(e.getMessage(), e);
         }
         return StageReport.of(Stage.RERUN, findings, good(chosen.size(), all), "recomputed: different");
     }
 
     private String good(long sampled, long all) {
-        long forged = Math.max(1, (all + 99) / 100);
-        BigDecimal caught = SpotCheck.caught(all, forged, sampled);
-        return "recomputed: identical: " + sampled + " of " + all + " trials; had 1 % of the trials been forged, this"
-                + " would have caught it with probability " + Decimals.text(caught, 3) + "; "
-                + examined.promise().compared() + " instances agree with exhaustive search; referee seed \""
-                + options.refereeSeed().text() + "\"";
+        return "recomputed: identical: " + sampled + " of " + all + " trials; " + SpotCheck.sentence(all, sampled)
+                + (searched > 0 ? "; " + searched + " instances agree with exhaustive search" : "")
+                + "; referee seed \"" + options.refereeSeed().text() + "\"";
     }
 
     private NavigableSet<Long> choose(long count, long all) {
@@ -90,54 +89,67 @@ final class SampleStage {
         return chosen;
     }
 
-    private void run(Experiment experiment, NavigableSet<Long> chosen, long offset, LinePass.Listener listener)
-            throws IOException, BundleFault, InterruptedException {
+    private void run(Experiment experiment, NavigableSet<Long> chosen, LinePass.Listener listener)
+            throws IOException, InterruptedException, WrittenLines.Stopped {
         String path = Layout.DATA + Layout.trials(experiment.id());
-        int strategies = experiment.strategies().size();
-        try (LineReader lines =
-                new LineReader(bag.open(path), path, options.limits().lineBytes())) {
-            for (long global : chosen) {
-                if (Thread.interrupted()) {
-                    throw new InterruptedException();
-                }
-                long index = global - offset;
-                Optional<byte[]> line = lines.next();
-                while (line.isPresent() && lines.number() <= index) {
-                    line = lines.next();
-                }
-                long instance = index / strategies;
-                int width = experiment.widths().get((int) (instance / experiment.trials()));
-                StrategyChoice choice = experiment.strategies().get((int) (index % strategies));
-                compare(experiment, width, instance % experiment.trials(), choice, line, lines.number(), path);
-                listener.read();
-            }
+        try (WrittenLines written = new WrittenLines(bag, path, options.limits().lineBytes(), findings)) {
+            new TrialPool(options.threads())
+                    .<Again, WrittenLines.Stopped>run(
+                            ranges(experiment, chosen),
+                            (e, width, trial) -> again(e, width, trial, chosen),
+                            (Again again) -> take(experiment, again, written, listener));
         }
     }
 
-    private void compare(
-            Experiment experiment,
-            int width,
-            long trial,
-            StrategyChoice choice,
-            Optional<byte[]> written,
-            long number,
-            String path) {
-        Instance instance = runner.instance(experiment, width, trial);
-        TrialRecord record = runner.run(experiment, choice, instance, trial);
-        byte[] again = CanonicalJson.bytes(TrialLine.write(record, choice));
-        compared++;
-        if (!Arrays.equals(written.orElseGet(() -> new byte[0]), again)) {
-            RerunStage.difference(findings, path, number, written.orElseGet(() -> new byte[0]), again);
-        }
-        if (CrossChecker.isExhaustive(files.study(), width)) {
-            TrialGroup group = new TrialGroup(experiment.id(), width, trial, List.of(record));
-            InstanceTally tally = new InstanceExaminer(Engines.reference()).examine(experiment, instance, group);
-            examined = examined.plus(tally);
-            if (tally.answers().outcome() == CheckOutcome.DIFFERS
-                    || tally.engines().outcome() == CheckOutcome.DIFFERS) {
-                findings.add(Finding.of(
-                        path, tally.answers().text() + "; " + tally.engines().text(), "no difference"));
+    /** Returns one range for each instance that has a chosen line. */
+    private static List<TrialRange> ranges(Experiment experiment, NavigableSet<Long> chosen) {
+        List<TrialRange> ranges = new ArrayList<>();
+        long last = -1;
+        for (long index : chosen) {
+            long instance = index / experiment.strategies().size();
+            if (instance != last) {
+                int width = experiment.widths().get((int) (instance / experiment.trials()));
+                long trial = instance % experiment.trials();
+                ranges.add(new TrialRange(experiment, width, trial, trial + 1));
+                last = instance;
             }
         }
+        return ranges;
+    }
+
+    private Again again(Experiment experiment, int width, long trial, NavigableSet<Long> chosen) {
+        Instance instance = runner.instance(experiment, width, trial);
+        long first = Lines.first(experiment, width, trial);
+        List<TrialRecord> records = new ArrayList<>();
+        for (int i = 0; i < experiment.strategies().size(); i++) {
+            if (chosen.contains(first + i)) {
+                records.add(runner.run(experiment, experiment.strategies().get(i), instance, trial));
+            }
+        }
+        TrialGroup group = new TrialGroup(experiment.id(), width, trial, records);
+        return new Again(
+                group,
+                CrossChecker.isExhaustive(files.study(), width)
+                        ? examiner.examine(experiment, instance, group)
+                        : InstanceTally.NONE);
+    }
+
+    private void take(Experiment experiment, Again again, WrittenLines written, LinePass.Listener listener)
+            throws WrittenLines.Stopped {
+        TrialGroup group = again.group();
+        long first = Lines.first(experiment, group.width(), group.trial());
+        for (TrialRecord record : group.records()) {
+            StrategyChoice choice = experiment.choice(record.cell().label()).orElseThrow();
+            written.compare(first + experiment.strategies().indexOf(choice), record, choice);
+            compared++;
+            listener.read();
+        }
+        InstanceTally examined = again.examined();
+        for (Comparison part : List.of(examined.promise(), examined.answers(), examined.engines())) {
+            if (part.outcome() == CheckOutcome.DIFFERS) {
+                written.note("exhaustive search: " + part.text(), "agreement");
+            }
+        }
+        searched += examined.promise().compared();
     }
 }

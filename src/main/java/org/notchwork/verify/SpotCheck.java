@@ -1,10 +1,13 @@
 package org.notchwork.verify;
 
 import java.math.BigDecimal;
+import java.math.RoundingMode;
 import org.notchwork.exact.Decimals;
 
 /** What a random sample of trials, drawn without replacement, would have caught. */
 public final class SpotCheck {
+
+    private static final int PLACES = 3;
 
     private SpotCheck() {}
 
@@ -27,5 +30,20 @@ public final class SpotCheck {
             missed = missed.multiply(Decimals.quotient(Math.max(0, all - many - i), all - i), Decimals.CONTEXT);
         }
         return BigDecimal.ONE.subtract(missed);
+    }
+
+    /**
+     * Says what a sample without a difference is worth; 1 % of the trials is rounded up to a whole one. The
+     * probability is rounded down, so that only certainty is called 1.
+     *
+     * @param all how many trials there are, at least 1
+     * @param sampled how many were drawn
+     */
+    static String sentence(long all, long sampled) {
+        long forged = (all + 99) / 100;
+        String probability =
+                caught(all, forged, sampled).setScale(PLACES, RoundingMode.DOWN).toPlainString();
+        return "had 1 % of the trials (" + forged + ") been forged, this sample would have caught at least one with"
+                + " probability " + probability;
     }
 }

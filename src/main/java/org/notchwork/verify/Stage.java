@@ -8,9 +8,9 @@ public enum Stage {
     CONTAINER("every file is a plain one, is listed, and what is listed is there", "nothing about what the files say"),
     /** Every file has the digest that the manifests list. */
     HASHES("every file has the bytes that the manifests list", "nothing against an author who made the manifests anew"),
-    /** Every file reads in the one form of its format. */
+    /** Every JSON file reads in the one form of its format. */
     SCHEMA(
-            "every file is canonical JSON of its format, so that all readers read the same",
+            "every JSON file and line is canonical and of its format, so that all readers read the same",
             "nothing about whether it is true"),
     /** The seal is over these bytes. */
     SEAL(

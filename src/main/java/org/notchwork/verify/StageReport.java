@@ -32,7 +32,8 @@ public record StageReport(
     static StageReport of(Stage stage, Findings findings, String good, String bad) {
         return findings.isEmpty()
                 ? of(stage, StageOutcome.PASSED, good)
-                : new StageReport(stage, StageOutcome.FAILED, bad, findings.first(), findings.count());
+                : new StageReport(
+                        stage, StageOutcome.FAILED, Printable.escape(bad), findings.first(), findings.count());
     }
 
     /** Returns the report as JSON. */

@@ -12,12 +12,14 @@ import org.notchwork.json.JsonValue;
  * @param stages one report a stage, in order
  * @param seal the seal as computed, where it could be
  * @param failedChecks how many cross-checks the bundle itself reports as failed
+ * @param notCovered the payload files that are not under the seal: of them only the digests were compared
  */
-public record Verdict(List<StageReport> stages, Optional<String> seal, long failedChecks) {
+public record Verdict(List<StageReport> stages, Optional<String> seal, long failedChecks, List<String> notCovered) {
 
-    /** Copies the list. */
+    /** Copies the lists. */
     public Verdict {
         stages = List.copyOf(stages);
+        notCovered = List.copyOf(notCovered);
     }
 
     /** Returns the exit code of the design: 0, 10, 11 or 12. */
@@ -56,6 +58,7 @@ public record Verdict(List<StageReport> stages, Optional<String> seal, long fail
                 .put("exit-code", exitCode())
                 .put("failed-cross-checks", failedChecks)
                 .put("format", "notchwork-verdict/1")
+                .put("not-covered", JsonArray.ofTexts(notCovered))
                 .put("seal", seal)
                 .put(
                         "stages",

@@ -7,8 +7,10 @@ import java.util.List;
 import java.util.Optional;
 import org.notchwork.bundle.Bag;
 import org.notchwork.bundle.BundleFault;
+import org.notchwork.bundle.Layout;
 import org.notchwork.check.CheckOutcome;
 import org.notchwork.seed.SeedTree;
+import org.notchwork.study.Study;
 import org.notchwork.trial.TrialRunner;
 
 /** Verifies a bundle, stage by stage. A stage that fails does not keep later ones from naming a deeper reason. */
@@ -83,30 +85,26 @@ public final class Verifier {
         OpenedFiles files = OpenedFiles.open(bag);
         TrialRunner runner = new TrialRunner(new SeedTree(files.study().seed()));
         LinePass pass = new LinePass(files.study(), bag, options.limits().lineBytes(), runner);
-        long instances = files.study().experiments().stream()
-                .mapToLong(e -> (long) e.widths().size() * e.trials())
-                .sum();
+        long instances =
+                files.study().experiments().stream().mapToLong(Lines::instances).sum();
         pass.run(counting(Stage.CERTIFICATES, instances));
         reports.add(StageReport.of(
                 Stage.SCHEMA,
                 StageOutcome.PASSED,
-                "all files canonical and of their format, " + pass.tree().size() + " trial lines"));
+                "all JSON files are canonical and name their format; no fault in study, seal, cross-checks, environment and "
+                        + pass.tree().size() + " trial lines"));
         reports.add(SealStage.report(files, bag, pass, options.expect()));
-        reports.add(StageReport.of(
-                Stage.CERTIFICATES,
-                pass.certificateFindings(),
-                pass.certificatesChecked() + " answers proved on instances drawn again from the seed",
-                "an answer or its certificate does not hold"));
+        reports.add(pass.certificates().report());
         reports.add(FiguresStage.report(files, pass));
-        reports.add(rerun(files, bag, runner, pass.isComplete(), instances));
+        reports.add(rerun(files, bag, runner, pass.misplacement().isEmpty(), instances));
         long failed = files.checks().stream()
                 .filter(c -> c.outcome() == CheckOutcome.DIFFERS)
                 .count();
-        return new Verdict(reports, Optional.of(files.seal().digest()), failed);
+        return new Verdict(reports, Optional.of(files.seal().digest()), failed, unsealed(files.study()));
     }
 
     private StageReport rerun(OpenedFiles files, Bag bag, TrialRunner runner, boolean complete, long instances)
-            throws IOException, BundleFault {
+            throws IOException {
         if (!complete) {
             return StageReport.of(
                     Stage.RERUN, StageOutcome.NOT_DONE, "the lines are not those that the study calls for");
@@ -116,9 +114,17 @@ public final class Verifier {
         }
         if (options.rerun() instanceof Rerun.Sample sample) {
             return new SampleStage(files, bag, options, runner)
-                    .sample(sample.trials(), counting(Stage.RERUN, sample.trials()));
+                    .sample(sample.trials(), counting(Stage.RERUN, Math.min(sample.trials(), Lines.of(files.study()))));
         }
         return StageReport.of(Stage.RERUN, StageOutcome.NOT_DONE, "no trial was run again");
+    }
+
+    /** Returns the payload files that are not under the seal and of which, so, only the digests are compared. */
+    private static List<String> unsealed(Study study) {
+        List<String> names = new ArrayList<>(Layout.payload(study));
+        names.removeAll(Layout.sealed(study));
+        names.remove(Layout.SEAL);
+        return names;
     }
 
     private LinePass.Listener counting(Stage stage, long all) {
@@ -133,6 +139,6 @@ public final class Verifier {
                 reports.add(StageReport.of(later, StageOutcome.NOT_DONE, "an earlier stage stopped here"));
             }
         }
-        return new Verdict(reports, Optional.empty(), 0);
+        return new Verdict(reports, Optional.empty(), 0, List.of());
     }
 }
