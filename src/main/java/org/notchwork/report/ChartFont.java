@@ -1,5 +1,6 @@
 package org.notchwork.report;
 
+import java.awt.AWTError;
 import java.awt.Font;
 import java.awt.FontFormatException;
 import java.awt.font.FontRenderContext;
@@ -22,7 +23,7 @@ final class ChartFont {
             // The native part is loaded by the first measurement only.
             width(font, "n");
             return font;
-        } catch (FontFormatException | IOException | LinkageError | InternalError e) {
+        } catch (FontFormatException | IOException | LinkageError | InternalError | AWTError e) {
             throw new IllegalStateException(
                     "charts cannot be drawn: this Java has no working fonts (" + e
                             + "); on Linux install fontconfig and libfreetype6, or a Java with its desktop module",

@@ -13,6 +13,7 @@ public final class Report {
 
     private static final int FOOT_TITLE = 60;
     private static final int FOOT_SEAL = 16;
+    private static final String HEADLESS = "java.awt.headless";
 
     private Report() {}
 
@@ -22,8 +23,10 @@ public final class Report {
      * @param results what the study came to
      * @param seal the seal, 64 hexadecimal digits
      * @param environment where and when it ran; the only source of dates
+     * @throws IllegalStateException if this Java cannot handle fonts, which the charts need
      */
     public static byte[] pdf(Results results, String seal, Environment environment) {
+        withoutScreen();
         try (PDDocument document = new PDDocument()) {
             Fonts fonts = Fonts.load(document);
             String title = Printable.escape(results.study().title());
@@ -44,6 +47,16 @@ public final class Report {
             return bytes.toByteArray();
         } catch (IOException e) {
             throw new UncheckedIOException("the report cannot be made: " + e.getMessage(), e);
+        }
+    }
+
+    /**
+     * Keeps the platform's drawing classes away from the screen, unless the user said otherwise. They would else ask
+     * for one even if charts go to a file, and fail where the environment names a display that does not answer.
+     */
+    private static void withoutScreen() {
+        if (System.getProperty(HEADLESS) == null) {
+            System.setProperty(HEADLESS, "true");
         }
     }
 }
