@@ -2,6 +2,9 @@ package org.notchwork.report;
 
 import java.io.IOException;
 import java.io.InputStream;
+import org.apache.fontbox.ttf.TTFParser;
+import org.apache.fontbox.ttf.TrueTypeFont;
+import org.apache.pdfbox.io.RandomAccessReadBuffer;
 import org.apache.pdfbox.pdmodel.PDDocument;
 import org.apache.pdfbox.pdmodel.font.PDFont;
 import org.apache.pdfbox.pdmodel.font.PDType0Font;
@@ -34,9 +37,13 @@ record Fonts(PDFont body, PDFont bold, PDFont mono) {
         return in;
     }
 
+    /** Ligatures are left out: a search for a word with two letters drawn as one glyph may not find it. */
     private static PDFont load(PDDocument document, String file) throws IOException {
         try (InputStream in = open(file)) {
-            return PDType0Font.load(document, in, true);
+            TrueTypeFont font = new TTFParser().parse(new RandomAccessReadBuffer(in));
+            document.registerTrueTypeFontForClosing(font);
+            font.setEnableGsub(false);
+            return PDType0Font.load(document, font, true);
         }
     }
 

@@ -46,6 +46,7 @@ class LayoutTest {
             assertTrue(glyphs.count > 500);
             assertEquals(List.of(), glyphs.outside);
             assertEquals(List.of(), glyphs.covered);
+            assertEquals(List.of(), glyphs.ligatures);
         }
     }
 
@@ -91,11 +92,12 @@ class LayoutTest {
         }
     }
 
-    /** Collects glyphs that are not inside the margins of their page, and pairs that cover one another. */
+    /** Collects glyphs outside the margins of their page, pairs that cover one another, and ligatures. */
     private static final class Glyphs extends PDFTextStripper {
 
         private final List<String> outside = new ArrayList<>();
         private final List<String> covered = new ArrayList<>();
+        private final List<String> ligatures = new ArrayList<>();
         private final List<TextPosition> onPage = new ArrayList<>();
         private int count;
 
@@ -104,6 +106,9 @@ class LayoutTest {
             count++;
             float right = text.getXDirAdj() + text.getWidthDirAdj();
             float bottom = text.getYDirAdj();
+            if (text.getUnicode().chars().anyMatch(c -> c >= 0xFB00 && c <= 0xFB06)) {
+                ligatures.add(text.getUnicode());
+            }
             if (text.getDir() == 0) {
                 if (!text.getUnicode().isBlank()) {
                     onPage.add(text);
