@@ -50,16 +50,18 @@ public final class FourierRoundsLaw implements QueryLaw {
      * Returns P(R ≤ m) = ∏_{i=0}^{n−2} (1 − 2^(i−m)), the probability that m words uniform on a space of dimension
      * n − 1 span it; 0 for m &lt; n − 1.
      */
-    public Prediction within(int width, int rounds) {
+    @Override
+    public Optional<Prediction> within(int width, long rounds) {
         if (rounds < width - 1) {
-            return Prediction.ratio(BigInteger.ZERO, BigInteger.ONE);
+            return Optional.of(Prediction.ratio(BigInteger.ZERO, BigInteger.ONE));
         }
-        BigInteger all = BigInteger.ONE.shiftLeft(rounds);
+        int m = Math.toIntExact(rounds);
+        BigInteger all = BigInteger.ONE.shiftLeft(m);
         BigInteger top = BigInteger.ONE;
         for (int i = 0; i < width - 1; i++) {
             top = top.multiply(all.subtract(BigInteger.ONE.shiftLeft(i)));
         }
-        return Prediction.ratio(top, BigInteger.ONE.shiftLeft(Math.multiplyExact(rounds, width - 1)));
+        return Optional.of(Prediction.ratio(top, BigInteger.ONE.shiftLeft(Math.multiplyExact(m, width - 1))));
     }
 
     @Override

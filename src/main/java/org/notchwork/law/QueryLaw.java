@@ -19,6 +19,16 @@ public interface QueryLaw {
     /** Returns the exact number of queries for one hidden period; empty if it depends on chance. */
     OptionalLong queries(int width, long period);
 
+    /**
+     * Returns the exact probability of at most m queries, without a query limit; empty where no formula is known.
+     *
+     * @param width the number of input bits
+     * @param queries m, at least 0
+     */
+    default Optional<Prediction> within(int width, long queries) {
+        return Optional.empty();
+    }
+
     /** Returns the formula of the mean, in one line of plain text. */
     String formula();
 

@@ -51,19 +51,20 @@ class FourierRoundsLawTest {
             if (!row.required("p_min").isNull()) {
                 assertEquals(
                         Fractions.value(row.required("p_min").asString()),
-                        law.within(width, width - 1).value());
+                        law.within(width, width - 1).orElseThrow().value());
             }
             assertPrints(
                     row.required("p_min_dec").asString(),
-                    law.within(width, width - 1).value());
+                    law.within(width, width - 1).orElseThrow().value());
             assertPrints(
-                    row.required("p_n").asString(), law.within(width, width).value());
+                    row.required("p_n").asString(),
+                    law.within(width, width).orElseThrow().value());
             assertPrints(
                     row.required("p_np4").asString(),
-                    law.within(width, width + 4).value());
+                    law.within(width, width + 4).orElseThrow().value());
             assertPrints(
                     row.required("p_np9").asString(),
-                    law.within(width, width + 9).value());
+                    law.within(width, width + 9).orElseThrow().value());
             assertQuantiles(width, row.required("quantiles"));
         }
     }
@@ -73,15 +74,15 @@ class FourierRoundsLawTest {
         for (Map.Entry<String, JsonNode> quantile : quantiles.properties()) {
             BigDecimal p = new BigDecimal(quantile.getKey());
             int rounds = quantile.getValue().asInt();
-            assertTrue(law.within(width, rounds).value().compareTo(p) >= 0);
-            assertTrue(law.within(width, rounds - 1).value().compareTo(p) < 0);
+            assertTrue(law.within(width, rounds).orElseThrow().value().compareTo(p) >= 0);
+            assertTrue(law.within(width, rounds - 1).orElseThrow().value().compareTo(p) < 0);
         }
     }
 
     /** ∏(1 − 2^−k) over all k, OEIS A048651. */
     @Test
     void independentWordsAppearAtOnceWithTheLimitProbability() {
-        assertPrints("0.28878809508660242", law.within(63, 62).value());
+        assertPrints("0.28878809508660242", law.within(63, 62).orElseThrow().value());
     }
 
     /** Limits of P(R ≤ n − 1 + e), e = 0 … 11: the product of OEIS A048651 divided by its first e factors. */
@@ -101,7 +102,7 @@ class FourierRoundsLawTest {
                 "0.9990237553471",
                 "0.9995117982173");
         for (int e = 0; e < limits.size(); e++) {
-            assertPrints(limits.get(e), law.within(63, 62 + e).value());
+            assertPrints(limits.get(e), law.within(63, 62 + e).orElseThrow().value());
         }
     }
 
@@ -125,7 +126,8 @@ class FourierRoundsLawTest {
             spanning += basis.rank() == width - 1 ? 1 : 0;
         }
         assertEquals(
-                Prediction.ratio(BigInteger.valueOf(spanning), BigInteger.valueOf(tuples)), law.within(width, rounds));
+                Prediction.ratio(BigInteger.valueOf(spanning), BigInteger.valueOf(tuples)),
+                law.within(width, rounds).orElseThrow());
     }
 
     /** E[R] = Σ P(R > m) and E[R²] = Σ (2m + 1) P(R > m). */
@@ -135,7 +137,8 @@ class FourierRoundsLawTest {
         BigDecimal mean = BigDecimal.ZERO;
         BigDecimal square = BigDecimal.ZERO;
         for (int m = 0; m < width + 130; m++) {
-            BigDecimal more = BigDecimal.ONE.subtract(law.within(width, m).value());
+            BigDecimal more =
+                    BigDecimal.ONE.subtract(law.within(width, m).orElseThrow().value());
             mean = mean.add(more);
             square = square.add(more.multiply(BigDecimal.valueOf(2L * m + 1)));
         }

@@ -51,7 +51,7 @@ class QueryCountsFollowTheLawTest {
         FourierRoundsLaw law = new FourierRoundsLaw();
         double before = 0;
         for (int m = 0; m < size - 1; m++) {
-            double within = law.within(width, m).value().doubleValue();
+            double within = law.within(width, m).orElseThrow().value().doubleValue();
             weights[m] = within - before;
             before = within;
         }
