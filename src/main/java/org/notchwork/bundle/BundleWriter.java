@@ -11,10 +11,13 @@ import java.nio.file.StandardOpenOption;
 import java.security.DigestOutputStream;
 import java.security.MessageDigest;
 import java.util.Map;
+import java.util.Set;
 import java.util.TreeMap;
+import java.util.TreeSet;
 import org.notchwork.json.CanonicalJson;
 import org.notchwork.json.JsonValue;
 import org.notchwork.json.Printable;
+import org.notchwork.problem.Attachment;
 import org.notchwork.study.Experiment;
 import org.notchwork.study.Study;
 import org.notchwork.study.StudyJson;
@@ -32,7 +35,8 @@ public final class BundleWriter implements AutoCloseable {
     private final Map<String, String> digests = new TreeMap<>();
     private final Map<String, Long> sizes = new TreeMap<>();
     private final MerkleTree tree = new MerkleTree();
-    private TrialFile open;
+    private LineFile open;
+    private LineFile openControls;
 
     private BundleWriter(Study study, Staging staging) {
         this.study = study;
@@ -75,13 +79,28 @@ public final class BundleWriter implements AutoCloseable {
      */
     public void add(String experiment, byte[] line, byte[] leafHash) throws IOException {
         if (open == null || !open.experiment.equals(experiment)) {
-            closeTrials();
-            open = new TrialFile(experiment, staging.folder());
+            open = next(open, experiment, Layout.trials(experiment));
         }
-        open.out.write(line);
-        open.out.write('\n');
-        open.size += line.length + 1L;
+        open.add(line);
         tree.addLeaf(leafHash);
+    }
+
+    /**
+     * Adds one line of controls.
+     *
+     * @param experiment the id of its experiment; experiments come one after another
+     * @param line the canonical line, without a line feed
+     */
+    public void addControl(String experiment, byte[] line) throws IOException {
+        if (openControls == null || !openControls.experiment.equals(experiment)) {
+            openControls = next(openControls, experiment, Layout.controls(experiment));
+        }
+        openControls.add(line);
+    }
+
+    private LineFile next(LineFile last, String experiment, String name) throws IOException {
+        close(last);
+        return new LineFile(experiment, name, staging.folder());
     }
 
     /**
@@ -90,10 +109,19 @@ public final class BundleWriter implements AutoCloseable {
      * @return the seal
      */
     public String finish(Results results, Environment environment, ReportMaker report) throws IOException {
-        closeTrials();
+        close(open);
+        open = null;
+        close(openControls);
+        openControls = null;
         for (Experiment experiment : study.experiments()) {
             if (!digests.containsKey(Layout.DATA + Layout.trials(experiment.id()))) {
                 throw new IllegalStateException("no trials of experiment " + experiment.id());
+            }
+        }
+        Set<String> attached = new TreeSet<>();
+        for (Attachment attachment : Layout.attachments(study)) {
+            if (attached.add(attachment.name())) {
+                write(Layout.DATA + Layout.attachment(attachment.name()), attachment.bytes());
             }
         }
         write(Layout.STUDY, StudyJson.write(study));
@@ -120,6 +148,10 @@ public final class BundleWriter implements AutoCloseable {
             if (open != null) {
                 open.out.close();
                 open = null;
+            }
+            if (openControls != null) {
+                openControls.out.close();
+                openControls = null;
             }
         }
     }
@@ -150,20 +182,18 @@ public final class BundleWriter implements AutoCloseable {
         sizes.put(path, (long) bytes.length);
     }
 
-    private void closeTrials() throws IOException {
-        if (open == null) {
+    private void close(LineFile done) throws IOException {
+        if (done == null) {
             return;
         }
-        TrialFile done = open;
-        open = null;
         done.out.close();
         Staging.force(done.file);
         digests.put(done.path, Digests.text(done.digest.digest()));
         sizes.put(done.path, done.size);
     }
 
-    /** The file of trials that is being written. */
-    private static final class TrialFile {
+    /** A file of lines that is being written. */
+    private static final class LineFile {
 
         private final String experiment;
         private final String path;
@@ -172,15 +202,21 @@ public final class BundleWriter implements AutoCloseable {
         private final OutputStream out;
         private long size;
 
-        TrialFile(String experiment, Path folder) throws IOException {
+        LineFile(String experiment, String name, Path folder) throws IOException {
             this.experiment = experiment;
-            this.path = Layout.DATA + Layout.trials(experiment);
+            this.path = Layout.DATA + name;
             this.file = folder.resolve(path);
             if (Files.exists(file, LinkOption.NOFOLLOW_LINKS)) {
-                throw new IllegalStateException("trials of experiment " + experiment + " do not come together");
+                throw new IllegalStateException("the lines of experiment " + experiment + " do not come together");
             }
             OutputStream plain = Files.newOutputStream(file, StandardOpenOption.CREATE_NEW, StandardOpenOption.WRITE);
             this.out = new BufferedOutputStream(new DigestOutputStream(plain, digest), BUFFER);
+        }
+
+        void add(byte[] line) throws IOException {
+            out.write(line);
+            out.write('\n');
+            size += line.length + 1L;
         }
     }
 }

@@ -9,6 +9,9 @@ public final class Formats {
     /** A line of trials. */
     public static final String TRIAL = "notchwork-trial/1";
 
+    /** A line of controls. */
+    public static final String CONTROL = "notchwork-control/1";
+
     /** The file of figures. */
     public static final String SUMMARY = "notchwork-summary/1";
 

@@ -2,6 +2,7 @@ package org.notchwork.bundle;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.notchwork.problem.Attachment;
 import org.notchwork.study.Experiment;
 import org.notchwork.study.Study;
 
@@ -57,13 +58,34 @@ public final class Layout {
         return "trials-" + experiment + ".jsonl";
     }
 
+    /** Returns the name of the file of an experiment's controls. */
+    public static String controls(String experiment) {
+        return "controls-" + experiment + ".jsonl";
+    }
+
+    /** Returns the name under which a file that the study names stands in the bundle. */
+    public static String attachment(String name) {
+        return "table-" + name;
+    }
+
+    /** Returns the files that a study names. */
+    public static List<Attachment> attachments(Study study) {
+        return study.experiments().stream()
+                .flatMap(e -> e.problem().attachments().stream())
+                .toList();
+    }
+
     /** Returns the names of the files under the seal, in the order of the seal. */
     public static List<String> sealed(Study study) {
         List<String> names = new ArrayList<>(List.of(CLAIMS, CROSS_CHECKS, STUDY, SUMMARY));
         for (Experiment experiment : study.experiments()) {
             names.add(trials(experiment.id()));
+            if (study.hasControls(experiment)) {
+                names.add(controls(experiment.id()));
+            }
         }
-        return names.stream().sorted().toList();
+        attachments(study).forEach(a -> names.add(attachment(a.name())));
+        return names.stream().distinct().sorted().toList();
     }
 
     /** Returns the names of all payload files, sorted. */

@@ -7,9 +7,12 @@ import org.notchwork.check.CheckOutcome;
 import org.notchwork.check.CrossCheck;
 import org.notchwork.exact.Decimals;
 import org.notchwork.figure.CellFigures;
+import org.notchwork.figure.ControlFigures;
+import org.notchwork.figure.FunctionFigures;
 import org.notchwork.figure.Interval;
 import org.notchwork.figure.QueryFigures;
 import org.notchwork.figure.RatioFigures;
+import org.notchwork.figure.SplitFigures;
 import org.notchwork.figure.Summary;
 import org.notchwork.json.JsonArray;
 import org.notchwork.json.JsonObject;
@@ -65,7 +68,7 @@ public final class SummaryFile {
     }
 
     private static JsonObject cell(CellFigures figures) {
-        return JsonObject.builder()
+        JsonObject.Builder json = JsonObject.builder()
                 .put("cell", figures.cell().id())
                 .put("censored", figures.censored())
                 .put("confirming-calls", figures.confirming())
@@ -76,7 +79,53 @@ public final class SummaryFile {
                 .put("success-interval", interval(figures.successInterval()))
                 .put("success-rate", Decimals.text(figures.success()))
                 .put("trials", figures.trials())
-                .put("wrong", figures.wrong())
+                .put("wrong", figures.wrong());
+        if (figures.unanswered() > 0) {
+            json.put("unanswered", figures.unanswered());
+        }
+        if (!figures.byFunction().isEmpty()) {
+            json.put(
+                    "by-function",
+                    array(figures.byFunction().stream()
+                            .map(SummaryFile::function)
+                            .toList()));
+        }
+        if (!figures.split().isEmpty()) {
+            json.put(
+                    "by-hidden",
+                    array(figures.split().stream().map(SummaryFile::side).toList()));
+        }
+        figures.control().ifPresent(c -> json.put("control", control(c)));
+        return json.build();
+    }
+
+    private static JsonObject function(FunctionFigures figures) {
+        return JsonObject.builder()
+                .put("function", figures.function())
+                .put("max", figures.max())
+                .put("mean", Decimals.text(figures.mean()))
+                .build();
+    }
+
+    private static JsonObject side(SplitFigures figures) {
+        return JsonObject.builder()
+                .put("hidden", figures.hidden())
+                .put("solved", figures.solved())
+                .put("success-interval", interval(figures.interval()))
+                .put("success-rate", Decimals.text(figures.success()))
+                .put("trials", figures.trials())
+                .build();
+    }
+
+    private static JsonObject control(ControlFigures figures) {
+        return JsonObject.builder()
+                .put("chance", Decimals.text(figures.chance()))
+                .put("claimed", figures.claimed())
+                .put("failed", figures.failed())
+                .put("flagged", figures.isFlagged())
+                .put("named-secret", figures.named())
+                .put("p", Decimals.text(figures.p()))
+                .put("trials", figures.trials())
                 .build();
     }
 

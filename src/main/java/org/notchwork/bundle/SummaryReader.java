@@ -7,12 +7,16 @@ import java.util.Optional;
 import java.util.regex.Pattern;
 import org.notchwork.exact.Decimals;
 import org.notchwork.figure.CellFigures;
+import org.notchwork.figure.ControlFigures;
+import org.notchwork.figure.FunctionFigures;
 import org.notchwork.figure.Interval;
 import org.notchwork.figure.QueryFigures;
 import org.notchwork.figure.RatioFigures;
+import org.notchwork.figure.SplitFigures;
 import org.notchwork.figure.Summary;
 import org.notchwork.json.Fault;
 import org.notchwork.json.Fields;
+import org.notchwork.json.JsonBoolean;
 import org.notchwork.json.JsonInteger;
 import org.notchwork.json.JsonText;
 import org.notchwork.json.JsonValue;
@@ -31,6 +35,7 @@ public final class SummaryReader {
     private static final Pattern DECIMAL = Pattern.compile("-?(0|[1-9][0-9]{0,39})\\.[0-9]{6}");
     private static final String MEND = "a decimal with six places, as a string, is wanted";
     private static final int LONGEST = 200;
+    private static final int MOST_PARTS = 8;
     private static final int MOST_CHECKS = 100_000;
 
     private final List<CellFigures> cells = new ArrayList<>();
@@ -85,10 +90,53 @@ public final class SummaryReader {
                 count(fields, "solved"),
                 count(fields, "wrong"),
                 count(fields, "censored"),
+                fields.optionalInteger("unanswered", 1, JsonInteger.MAX).orElse(0),
                 queries(fields.object("queries")),
                 count(fields, "confirming-calls"),
                 decimal(fields, "success-rate"),
-                interval(fields.object("success-interval")));
+                interval(fields.object("success-interval")),
+                functions(fields),
+                sides(fields),
+                fields.optionalObject("control").map(SummaryReader::control));
+        fields.end();
+        return figures;
+    }
+
+    private static List<FunctionFigures> functions(Fields fields) {
+        List<FunctionFigures> figures = new ArrayList<>();
+        for (Fields.Item item : fields.optionalItems("by-function", 1, MOST_PARTS).orElse(List.of())) {
+            Fields one = item.object();
+            figures.add(
+                    new FunctionFigures(one.text("function", 1, LONGEST), decimal(one, "mean"), count(one, "max")));
+            one.end();
+        }
+        return figures;
+    }
+
+    private static List<SplitFigures> sides(Fields fields) {
+        List<SplitFigures> figures = new ArrayList<>();
+        for (Fields.Item item : fields.optionalItems("by-hidden", 1, MOST_PARTS).orElse(List.of())) {
+            Fields one = item.object();
+            figures.add(new SplitFigures(
+                    one.text("hidden", 1, LONGEST),
+                    count(one, "trials"),
+                    count(one, "solved"),
+                    decimal(one, "success-rate"),
+                    interval(one.object("success-interval"))));
+            one.end();
+        }
+        return figures;
+    }
+
+    private static ControlFigures control(Fields fields) {
+        ControlFigures figures = new ControlFigures(
+                count(fields, "trials"),
+                count(fields, "named-secret"),
+                count(fields, "claimed"),
+                count(fields, "failed"),
+                decimal(fields, "chance"),
+                decimal(fields, "p"));
+        fields.require("flagged", new JsonBoolean(figures.isFlagged()));
         fields.end();
         return figures;
     }

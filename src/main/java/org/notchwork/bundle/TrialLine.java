@@ -1,8 +1,9 @@
 package org.notchwork.bundle;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import org.notchwork.bits.Word;
+import java.util.stream.IntStream;
 import org.notchwork.json.Fault;
 import org.notchwork.json.Fields;
 import org.notchwork.json.JsonArray;
@@ -12,7 +13,6 @@ import org.notchwork.json.JsonValue;
 import org.notchwork.problem.Answer;
 import org.notchwork.problem.Certificate;
 import org.notchwork.problem.Counts;
-import org.notchwork.problem.Pair;
 import org.notchwork.strategy.Usage;
 import org.notchwork.study.Cell;
 import org.notchwork.study.StrategyChoice;
@@ -22,18 +22,31 @@ import org.notchwork.trial.TrialRecord;
 /** One line of a file of trials: its writer and its reader. */
 public final class TrialLine {
 
-    private static final int GREATEST_WIDTH = 63;
-    private static final int LONGEST_LABEL = 121;
+    /** The greatest width of any problem. */
+    static final int GREATEST_WIDTH = 2048;
+    /** The longest label of a strategy. */
+    static final int LONGEST_LABEL = 121;
+
+    private static final int MOST_FUNCTIONS = 8;
 
     private TrialLine() {}
 
-    /** Returns the line of a record as JSON. */
+    /** Returns the line of a record of a problem with one function as JSON. */
     public static JsonObject write(TrialRecord record, StrategyChoice choice) {
+        return write(record, choice, List.of());
+    }
+
+    /**
+     * Returns the line of a record as JSON.
+     *
+     * @param functions the names of the functions that are counted apart; empty if there is but one
+     */
+    public static JsonObject write(TrialRecord record, StrategyChoice choice, List<String> functions) {
         JsonObject.Builder line = JsonObject.builder()
                 .put("calls", counts(record.counts()))
                 .put("equations", record.usage().equations())
                 .put("format", Formats.TRIAL)
-                .put("hidden", answer(record.hidden()))
+                .put("hidden", AnswerForm.write(record.hidden()))
                 .put("memory-words", record.usage().memoryWords())
                 .put("outcome", record.outcome().word())
                 .put("strategy", record.cell().label())
@@ -41,8 +54,14 @@ public final class TrialLine {
                 .put("width", record.cell().width())
                 .put("engine", choice.engine().map(e -> e.name()))
                 .put("sight", choice.sight());
-        record.answer().ifPresent(a -> line.put("answer", answer(a)));
-        record.certificate().ifPresent(c -> line.put("certificate", certificate(c)));
+        if (!record.byFunction().isEmpty()) {
+            JsonArray each = new JsonArray(IntStream.range(0, functions.size())
+                    .<JsonValue>mapToObj(i -> named(functions.get(i), record.byFunction().get(i)))
+                    .toList());
+            line.put("calls-by-function", each);
+        }
+        record.answer().ifPresent(a -> line.put("answer", AnswerForm.write(a)));
+        record.certificate().ifPresent(c -> line.put("certificate", CertificateForm.write(c)));
         return line.build();
     }
 
@@ -73,13 +92,14 @@ public final class TrialLine {
         Optional<String> sight = fields.optionalText("sight", 1, LONGEST_LABEL);
         Optional<Outcome> outcome = outcome(fields);
         Counts counts = counts(fields.object("calls"));
+        List<Counts> byFunction = byFunction(fields, counts);
         Usage usage = new Usage(
                 fields.integer("equations", 0, JsonInteger.MAX), fields.integer("memory-words", 0, JsonInteger.MAX));
-        Optional<Answer> hidden = answer(fields.object("hidden"), width);
+        Optional<Answer> hidden = AnswerForm.read(fields.object("hidden"), width);
         Optional<Answer> answer = Optional.empty();
         Optional<Certificate> certificate = Optional.empty();
-        if (outcome.isPresent() && outcome.get() != Outcome.CENSORED) {
-            answer = answer(fields.object("answer"), width);
+        if (outcome.isPresent() && (outcome.get() == Outcome.SOLVED || outcome.get() == Outcome.WRONG)) {
+            answer = AnswerForm.read(fields.object("answer"), width);
             certificate = CertificateForm.read(fields.object("certificate"), width);
         }
         fields.end();
@@ -87,7 +107,15 @@ public final class TrialLine {
             return Optional.empty();
         }
         TrialRecord record = new TrialRecord(
-                cell, trial, hidden.orElseThrow(), outcome.orElseThrow(), answer, certificate, counts, usage);
+                cell,
+                trial,
+                hidden.orElseThrow(),
+                outcome.orElseThrow(),
+                answer,
+                certificate,
+                counts,
+                byFunction,
+                usage);
         return Optional.of(new Read(record, engine, sight));
     }
 
@@ -98,11 +126,32 @@ public final class TrialLine {
                 return Optional.of(outcome);
             }
         }
-        fields.fault("outcome", Fields.quoted(word), "solved, wrong or censored is wanted");
+        fields.fault("outcome", Fields.quoted(word), "solved, wrong, censored or unanswered is wanted");
         return Optional.empty();
     }
 
-    private static JsonObject counts(Counts counts) {
+    private static JsonObject named(String function, Counts counts) {
+        JsonObject.Builder json = JsonObject.builder().put("function", function);
+        counts(counts).members().forEach(json::put);
+        return json.build();
+    }
+
+    private static List<Counts> byFunction(Fields fields, Counts all) {
+        List<Counts> each = new ArrayList<>();
+        for (Fields.Item item : fields.optionalItems("calls-by-function", 2, MOST_FUNCTIONS).orElse(List.of())) {
+            Fields one = item.object();
+            one.text("function", 1, LONGEST_LABEL);
+            each.add(counts(one));
+        }
+        Counts sum = each.stream().reduce(Counts.NONE, Counts::plus);
+        if (!each.isEmpty() && !sum.equals(all)) {
+            fields.fault("calls-by-function", "the functions do not add up to the calls", "their sum is wanted");
+        }
+        return each;
+    }
+
+    /** Returns the counts as the members that every list of calls has. */
+    static JsonObject counts(Counts counts) {
         return JsonObject.builder()
                 .put("classical", counts.classical())
                 .put("confirming", counts.confirming())
@@ -111,7 +160,8 @@ public final class TrialLine {
                 .build();
     }
 
-    private static Counts counts(Fields fields) {
+    /** Reads the members that every list of calls has. */
+    static Counts counts(Fields fields) {
         long most = JsonInteger.MAX / 4;
         Counts counts = new Counts(
                 fields.integer("classical", 0, most),
@@ -120,44 +170,5 @@ public final class TrialLine {
                 fields.integer("confirming", 0, most));
         fields.end();
         return counts;
-    }
-
-    private static JsonObject answer(Answer answer) {
-        Answer.Period period = (Answer.Period) answer;
-        return JsonObject.builder().put("period", period.s().hex()).build();
-    }
-
-    private static Optional<Answer> answer(Fields fields, int width) {
-        Optional<Word> s = CertificateForm.word(fields, "period", width);
-        fields.end();
-        if (s.isPresent() && s.get().isZero()) {
-            fields.fault("period", "0", "a period is not 0");
-            return Optional.empty();
-        }
-        return s.map(Answer.Period::new);
-    }
-
-    private static JsonObject certificate(Certificate certificate) {
-        if (certificate instanceof Certificate.Collision collision) {
-            return JsonObject.builder().put("collision", pair(collision.pair())).build();
-        }
-        Certificate.Equations equations = (Certificate.Equations) certificate;
-        JsonObject body = JsonObject.builder()
-                .put("confirmation", pair(equations.confirmation()))
-                .put(
-                        "words",
-                        JsonArray.ofTexts(
-                                equations.words().stream().map(Word::hex).toList()))
-                .build();
-        return JsonObject.builder().put("equations", body).build();
-    }
-
-    private static JsonObject pair(Pair pair) {
-        return JsonObject.builder()
-                .put("fx", pair.fx().hex())
-                .put("fy", pair.fy().hex())
-                .put("x", pair.x().hex())
-                .put("y", pair.y().hex())
-                .build();
     }
 }

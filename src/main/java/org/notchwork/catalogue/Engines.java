@@ -5,7 +5,9 @@ import java.util.Optional;
 import org.notchwork.engine.Engine;
 import org.notchwork.engine.annihilator.AnnihilatorEngine;
 import org.notchwork.engine.fibre.FibreEngine;
+import org.notchwork.engine.stabilizer.StabilizerEngine;
 import org.notchwork.engine.statevector.StateVectorEngine;
+import org.notchwork.engine.weights.WeightsEngine;
 
 /** The engines there are. */
 public final class Engines {
@@ -13,7 +15,19 @@ public final class Engines {
     private static final List<Engine> REFERENCE =
             List.of(new StateVectorEngine(), new FibreEngine(), new AnnihilatorEngine());
 
-    private static final List<Engine> ALL = REFERENCE;
+    private static final List<Engine> ALL = List.of(
+            new StateVectorEngine(),
+            new FibreEngine(),
+            new WeightsEngine(),
+            new StabilizerEngine(),
+            new AnnihilatorEngine());
+
+    private static final List<Engine> BY_STRENGTH = List.of(
+            new StateVectorEngine(),
+            new StabilizerEngine(),
+            new WeightsEngine(),
+            new FibreEngine(),
+            new AnnihilatorEngine());
 
     private Engines() {}
 
@@ -28,6 +42,14 @@ public final class Engines {
      */
     public static List<Engine> reference() {
         return REFERENCE;
+    }
+
+    /**
+     * Returns all engines, the strongest evidence first: gate by gate on both registers, on the circuit of an affine
+     * function, from evaluations, told the secret.
+     */
+    public static List<Engine> byStrength() {
+        return BY_STRENGTH;
     }
 
     /** Returns the names, in the order of the documentation. */

@@ -16,12 +16,18 @@ public sealed interface Engine permits BlindEngine, SightedEngine {
     String description();
 
     /**
-     * Returns why the engine cannot serve a problem at a width, with an engine that can; empty if it can.
+     * Returns why the engine cannot run a circuit on a problem at a width, with an engine that can; empty if it can.
      *
      * @param problem the problem
      * @param width the number of input bits
+     * @param circuit the circuit
      */
-    Optional<String> refusal(Problem problem, int width);
+    Optional<String> refusal(Problem problem, int width, Circuit circuit);
+
+    /** Returns whether the engine can open what the controls of a problem face, which need not be of its family. */
+    default boolean takesControlsOf(Problem problem) {
+        return true;
+    }
 
     /** Returns about how many bytes one simulation of a width takes. */
     long memoryBytes(int width);

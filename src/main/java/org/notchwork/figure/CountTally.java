@@ -4,6 +4,7 @@ import java.math.BigDecimal;
 import java.math.BigInteger;
 import java.util.Map;
 import java.util.Optional;
+import java.util.SortedMap;
 import java.util.TreeMap;
 import org.notchwork.exact.Decimals;
 
@@ -21,6 +22,11 @@ final class CountTally {
 
     long size() {
         return size;
+    }
+
+    /** Returns a copy of the numbers with how often each occurred. */
+    SortedMap<Long, Long> multiplicities() {
+        return new TreeMap<>(multiplicity);
     }
 
     long min() {

@@ -4,10 +4,12 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.SortedMap;
 import org.notchwork.study.Cell;
 import org.notchwork.study.Experiment;
 import org.notchwork.study.StrategyChoice;
 import org.notchwork.study.Study;
+import org.notchwork.trial.ControlRecord;
 import org.notchwork.trial.TrialGroup;
 import org.notchwork.trial.TrialRecord;
 
@@ -52,6 +54,23 @@ public final class SummaryBuilder {
         }
     }
 
+    /** Adds one control. */
+    public void addControl(ControlRecord record) {
+        Place place = new Place(record.cell().experiment(), record.cell().width());
+        cells.getOrDefault(place, List.of()).stream()
+                .filter(tally -> tally.cell().equals(record.cell()))
+                .forEach(tally -> tally.add(record));
+    }
+
+    /** Returns how often each number of queries occurred in a cell. */
+    public SortedMap<Long, Long> distribution(Cell cell) {
+        return cells.getOrDefault(new Place(cell.experiment(), cell.width()), List.of()).stream()
+                .filter(tally -> tally.cell().equals(cell))
+                .findFirst()
+                .map(CellTally::distribution)
+                .orElseThrow(() -> new IllegalArgumentException("no cell " + cell.id()));
+    }
+
     /** Returns the figures of all trials added; every cell must have had one. */
     public Summary summary() {
         return new Summary(
@@ -77,7 +96,7 @@ public final class SummaryBuilder {
     private static List<CellTally> tallies(Experiment experiment, int width) {
         List<CellTally> tallies = new ArrayList<>();
         for (StrategyChoice choice : experiment.strategies()) {
-            tallies.add(new CellTally(new Cell(experiment.id(), width, choice.label()), choice));
+            tallies.add(new CellTally(experiment.problem(), new Cell(experiment.id(), width, choice.label()), choice));
         }
         return tallies;
     }

@@ -27,4 +27,61 @@ public sealed interface Certificate {
             words = List.copyOf(words);
         }
     }
+
+    /**
+     * Pairs of points with one value each; their sums span the subspace. Checked by two evaluations a pair and a rank.
+     *
+     * @param pairs as many as the subspace has dimensions
+     */
+    record Collisions(List<Pair> pairs) implements Certificate {
+
+        /** Copies the pairs. */
+        public Collisions {
+            pairs = List.copyOf(pairs);
+        }
+    }
+
+    /**
+     * Independent words orthogonal to a subspace, and pairs that confirm a basis of it. Checked by rank, inner products
+     * and two evaluations a pair.
+     *
+     * @param words n − k independent words of n bits, in the order in which they were found
+     * @param confirmations 0 and each word of the basis with their values
+     */
+    record Annihilators(List<Word> words, List<Pair> confirmations) implements Certificate {
+
+        /** Copies both lists. */
+        public Annihilators {
+            words = List.copyOf(words);
+            confirmations = List.copyOf(confirmations);
+        }
+    }
+
+    /**
+     * Words that were measured and span everything, so that no word but 0 is orthogonal to all of them. Only the rank
+     * can be checked: that the words were measured has to be re-run.
+     *
+     * @param words n independent words of n bits, in the order in which they were found
+     */
+    record Spanning(List<Word> words) implements Certificate {
+
+        /** Copies the words. */
+        public Spanning {
+            words = List.copyOf(words);
+        }
+    }
+
+    /**
+     * Two points with different values. Checked by two evaluations.
+     *
+     * @param pair the two points
+     */
+    record Difference(Pair pair) implements Certificate {}
+
+    /**
+     * Nothing that a few evaluations could check.
+     *
+     * @param basis what the answer rests on, in a few words
+     */
+    record Absent(String basis) implements Certificate {}
 }

@@ -30,6 +30,15 @@ public record Counts(long classical, long quantum, long inverse, long confirming
         return Math.addExact(queries(), confirming);
     }
 
+    /** Returns both counts together. */
+    public Counts plus(Counts other) {
+        return new Counts(
+                Math.addExact(classical, other.classical),
+                Math.addExact(quantum, other.quantum),
+                Math.addExact(inverse, other.inverse),
+                Math.addExact(confirming, other.confirming));
+    }
+
     /** Returns these counts with one more call of a kind. */
     public Counts plus(CallKind kind) {
         return switch (kind) {

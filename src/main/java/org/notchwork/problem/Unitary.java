@@ -1,5 +1,7 @@
 package org.notchwork.problem;
 
+import java.util.Optional;
+
 /**
  * U_f: |x⟩|z⟩ → |x⟩|z ⊕ f(x)⟩ as an engine sees it.
  *
@@ -41,5 +43,10 @@ public final class Unitary {
     /** Returns f(x), the word that U_f adds to the value register beside x; not a query. */
     public long image(long x) {
         return function.at(x);
+    }
+
+    /** Returns the circuit of U_f, for a function that is given as one; empty for a function known by its values. */
+    public Optional<Network> network() {
+        return function instanceof NetworkFunction drawn ? Optional.of(drawn.network()) : Optional.empty();
     }
 }

@@ -1,5 +1,6 @@
 package org.notchwork.run;
 
+import java.util.List;
 import org.notchwork.bundle.MerkleTree;
 import org.notchwork.bundle.TrialLine;
 import org.notchwork.json.CanonicalJson;
@@ -12,8 +13,8 @@ final class Line {
     private final byte[] bytes;
     private final byte[] leafHash;
 
-    Line(TrialRecord record, StrategyChoice choice) {
-        this.bytes = CanonicalJson.bytes(TrialLine.write(record, choice));
+    Line(TrialRecord record, StrategyChoice choice, List<String> functions) {
+        this.bytes = CanonicalJson.bytes(TrialLine.write(record, choice, functions));
         this.leafHash = MerkleTree.leaf(bytes);
     }
 

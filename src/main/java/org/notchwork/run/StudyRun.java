@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.function.Supplier;
 import org.notchwork.bundle.BundleWriter;
+import org.notchwork.bundle.ControlLine;
 import org.notchwork.bundle.Environment;
 import org.notchwork.bundle.Results;
 import org.notchwork.catalogue.Engines;
@@ -17,15 +18,16 @@ import org.notchwork.check.InstanceTally;
 import org.notchwork.check.LineChecks;
 import org.notchwork.claim.Judge;
 import org.notchwork.figure.Summary;
+import org.notchwork.json.CanonicalJson;
 import org.notchwork.figure.SummaryBuilder;
 import org.notchwork.problem.Instance;
 import org.notchwork.report.Report;
-import org.notchwork.seed.SeedTree;
 import org.notchwork.study.Experiment;
 import org.notchwork.study.Study;
 import org.notchwork.trial.TrialGroup;
 import org.notchwork.trial.TrialPool;
 import org.notchwork.trial.TrialRange;
+import org.notchwork.trial.ControlRecord;
 import org.notchwork.trial.TrialRunner;
 
 /** Runs a study from its first trial to its sealed bundle. */
@@ -45,7 +47,7 @@ public final class StudyRun {
     public StudyRun(Study study, int threads) {
         this.study = study;
         this.threads = threads;
-        this.runner = new TrialRunner(new SeedTree(study.seed()));
+        this.runner = new TrialRunner(study);
     }
 
     /**
@@ -93,6 +95,10 @@ public final class StudyRun {
             for (Line line : notch.lines()) {
                 writer.add(group.experiment(), line.bytes(), line.leafHash());
             }
+            for (ControlRecord control : group.controls()) {
+                writer.addControl(group.experiment(), CanonicalJson.bytes(ControlLine.write(control)));
+                figures.addControl(control);
+            }
             figures.add(group);
             lines.add(group);
             examined.merge(
@@ -108,7 +114,7 @@ public final class StudyRun {
         TrialGroup group = runner.run(experiment, width, trial);
         List<Line> lines = new ArrayList<>();
         for (int i = 0; i < group.records().size(); i++) {
-            lines.add(new Line(group.records().get(i), experiment.strategies().get(i)));
+            lines.add(new Line(group.records().get(i), experiment.strategies().get(i), experiment.problem().functions()));
         }
         InstanceTally examined = InstanceTally.NONE;
         if (CrossChecker.isExhaustive(study, width)) {

@@ -20,6 +20,16 @@ public record Address(String experiment, int width, long trial, String role) {
         return new Address(experiment, width, trial, INSTANCE);
     }
 
+    /** Returns the stream that draws what the controls of a trial face. */
+    public static Address control(String experiment, int width, long trial) {
+        return new Address(experiment, width, trial, "control");
+    }
+
+    /** Returns the private stream of a strategy in the control of a trial. */
+    public static Address control(String experiment, int width, long trial, String label) {
+        return new Address(experiment, width, trial, "control:" + label);
+    }
+
     /** Returns the private stream of a strategy in a trial. */
     public static Address strategy(String experiment, int width, long trial, String label) {
         return new Address(experiment, width, trial, "strategy:" + label);

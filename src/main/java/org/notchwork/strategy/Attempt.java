@@ -24,4 +24,11 @@ public sealed interface Attempt {
      * @param usage what was used besides queries
      */
     record Censored(Usage usage) implements Attempt {}
+
+    /**
+     * The strategy did all that it does and has no answer; more queries were allowed.
+     *
+     * @param usage what was used besides queries
+     */
+    record Unanswered(Usage usage) implements Attempt {}
 }

@@ -1,11 +1,25 @@
 package org.notchwork.strategy;
 
+import org.notchwork.engine.Circuit;
 import org.notchwork.engine.Simulation;
 import org.notchwork.problem.Oracle;
 import org.notchwork.seed.RandomStream;
 
 /** A strategy that runs circuits around the function. */
 public non-sealed interface QuantumStrategy extends Strategy {
+
+    /** Returns the circuit that the strategy runs. */
+    Circuit circuit();
+
+    /** Returns whether the answer is right and the limit on rounds is kept for certain, so that all secrets are run. */
+    default boolean isZeroError() {
+        return false;
+    }
+
+    /** Returns whether the strategy makes sense of disturbed samples. */
+    default boolean bearsNoise() {
+        return false;
+    }
 
     /**
      * Tries to answer.

@@ -1,6 +1,7 @@
 package org.notchwork.strategy;
 
 import java.util.Optional;
+import org.notchwork.json.JsonObject;
 import org.notchwork.problem.Problem;
 
 /** A way to answer a question. Immutable and without state. */
@@ -8,6 +9,11 @@ public sealed interface Strategy permits ClassicalStrategy, QuantumStrategy {
 
     /** Returns the name, as a study file gives it. */
     String name();
+
+    /** Returns the settings as a study file writes them, defaults filled in, the name not among them. */
+    default JsonObject settings() {
+        return JsonObject.builder().build();
+    }
 
     /** Returns in one sentence how the strategy works, for people. */
     String description();

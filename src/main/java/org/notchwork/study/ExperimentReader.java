@@ -7,6 +7,8 @@ import org.notchwork.catalogue.Problems;
 import org.notchwork.json.Fields;
 import org.notchwork.json.JsonInteger;
 import org.notchwork.json.Spelling;
+import org.notchwork.problem.Attachments;
+import org.notchwork.problem.Family;
 import org.notchwork.problem.Problem;
 
 /** Reads one experiment. */
@@ -20,10 +22,10 @@ final class ExperimentReader {
     private ExperimentReader() {}
 
     /** Reads an experiment; {@code ids} has seen the ids before it. */
-    static ExperimentReading read(Fields fields, Ids ids) {
+    static ExperimentReading read(Fields fields, Ids ids, Attachments files) {
         int before = fields.faults().size();
         String id = ids.read(fields);
-        Optional<Problem> problem = problem(fields.object("problem"));
+        Optional<Problem> problem = problem(fields.object("problem"), files);
         List<Integer> widths = widths(fields, problem);
         List<StrategyChoice> strategies = strategies(fields, problem, widths);
         int trials = (int) fields.integer("trials", 1, MOST_TRIALS);
@@ -34,7 +36,7 @@ final class ExperimentReader {
                 id, problem.filter(p -> sound).map(p -> new Experiment(id, p, widths, strategies, trials, limit)));
     }
 
-    private static Optional<Problem> problem(Fields settings) {
+    private static Optional<Problem> problem(Fields settings, Attachments files) {
         if (settings.isStandIn()) {
             return Optional.empty();
         }
@@ -44,19 +46,16 @@ final class ExperimentReader {
             return Optional.empty();
         }
         String kind = settings.text("kind", 1, 60);
-        return Problems.family(kind)
-                .map(family -> {
-                    Problem configured = family.configure(settings);
-                    settings.end();
-                    return configured;
-                })
-                .or(() -> {
-                    if (!kind.isEmpty()) {
-                        settings.fault(
-                                "kind", "no problem " + Fields.quoted(kind), Spelling.mend(kind, Problems.kinds()));
-                    }
-                    return Optional.empty();
-                });
+        Optional<Family> family = Problems.family(kind);
+        if (family.isEmpty()) {
+            if (!kind.isEmpty()) {
+                settings.fault("kind", "no problem " + Fields.quoted(kind), Spelling.mend(kind, Problems.kinds()));
+            }
+            return Optional.empty();
+        }
+        Optional<Problem> configured = family.get().configure(settings, files);
+        settings.end();
+        return configured;
     }
 
     private static List<Integer> widths(Fields fields, Optional<Problem> problem) {
@@ -92,7 +91,7 @@ final class ExperimentReader {
         for (Fields.Item item : fields.items("strategies", 1, MOST_STRATEGIES)) {
             reader.read(item).ifPresent(choice -> {
                 if (choices.stream().anyMatch(c -> c.label().equals(choice.label()))) {
-                    item.fault("a second " + choice.label(), "strategies of an experiment must differ");
+                    item.fault("a second " + choice.label(), "another strategy, or a \"label\" of its own, is wanted");
                 }
                 choices.add(choice);
             });

@@ -24,7 +24,7 @@ public final class StudyJson {
                         array(study.experiments().stream()
                                 .map(StudyJson::experiment)
                                 .toList()))
-                .put("format", StudyReader.FORMAT)
+                .put("format", study.version() == 1 ? StudyReader.FORMAT : StudyReader.SECOND_FORMAT)
                 .put("question", study.question())
                 .put("seed", study.seed().text())
                 .put("title", study.title())
@@ -74,10 +74,28 @@ public final class StudyJson {
     }
 
     private static JsonObject choice(StrategyChoice choice) {
-        return JsonObject.builder()
+        JsonObject.Builder json = JsonObject.builder()
                 .put("name", choice.strategy().name())
-                .put("engine", choice.engine().map(e -> e.name()))
-                .build();
+                .put("label", choice.ownLabel());
+        choice.strategy().settings().members().forEach(json::put);
+        if (choice.asked() == StrategyChoice.Asked.BY_NAME) {
+            json.put("engine", choice.engine().map(e -> e.name()));
+        } else {
+            json.put("engine", StrategyReader.AUTO);
+        }
+        if (choice.asked() == StrategyChoice.Asked.AUTO_OR_SIGHTED) {
+            json.put("allow-sighted", true);
+        }
+        choice.control().ifPresent(control -> json.put("control", control));
+        if (!choice.noise().isNone()) {
+            json.put(
+                    "noise",
+                    JsonObject.builder()
+                            .put("readout-flip", text(choice.noise().readoutFlip()))
+                            .put("uniform-mix", text(choice.noise().uniformMix()))
+                            .build());
+        }
+        return json.build();
     }
 
     private static String text(BigDecimal bound) {

@@ -9,7 +9,9 @@ public enum Outcome {
     /** The answer was wrong. */
     WRONG,
     /** The query limit was reached first. */
-    CENSORED;
+    CENSORED,
+    /** The strategy had done all that it does and named nothing. */
+    UNANSWERED;
 
     /** Returns the word in files. */
     public String word() {

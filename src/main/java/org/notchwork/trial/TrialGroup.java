@@ -9,11 +9,19 @@ import java.util.List;
  * @param width the number of input bits
  * @param trial the number of the trial, from 0
  * @param records one a strategy, in the order of the study
+ * @param controls one a strategy that has a control at this width, in the order of the study
  */
-public record TrialGroup(String experiment, int width, long trial, List<TrialRecord> records) {
+public record TrialGroup(
+        String experiment, int width, long trial, List<TrialRecord> records, List<ControlRecord> controls) {
 
-    /** Copies the list. */
+    /** Creates a group without controls. */
+    public TrialGroup(String experiment, int width, long trial, List<TrialRecord> records) {
+        this(experiment, width, trial, records, List.of());
+    }
+
+    /** Copies the lists. */
     public TrialGroup {
         records = List.copyOf(records);
+        controls = List.copyOf(controls);
     }
 }

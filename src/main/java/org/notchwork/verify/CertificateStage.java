@@ -2,7 +2,7 @@ package org.notchwork.verify;
 
 import java.util.Optional;
 import java.util.OptionalLong;
-import org.notchwork.check.CertificateCheck;
+import org.notchwork.certificate.CertificateCheck;
 import org.notchwork.problem.Answer;
 import org.notchwork.problem.Instance;
 import org.notchwork.study.Experiment;

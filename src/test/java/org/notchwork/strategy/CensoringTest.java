@@ -7,7 +7,7 @@ import java.util.List;
 import java.util.Optional;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
-import org.notchwork.check.CertificateCheck;
+import org.notchwork.certificate.CertificateCheck;
 import org.notchwork.problem.Counts;
 import org.notchwork.problem.Instance;
 import org.notchwork.study.Experiment;

@@ -1,18 +1,20 @@
 package org.notchwork.engine.annihilator;
 
+import java.util.List;
 import java.util.Optional;
-import org.notchwork.engine.Outcomes;
-import org.notchwork.engine.Reach;
+import org.notchwork.bits.Word;
+import org.notchwork.engine.Circuit;
 import org.notchwork.engine.SightedEngine;
 import org.notchwork.engine.Simulation;
 import org.notchwork.problem.Answer;
 import org.notchwork.problem.Problem;
+import org.notchwork.problem.Promise;
+import org.notchwork.problem.Question;
 import org.notchwork.problem.Unitary;
-import org.notchwork.seed.RandomStream;
 
 /**
- * Samples uniformly from {y : y·s = 0}, the distribution that theory gives for a function with period s. It is TOLD
- * s: its figures show what theory says, not that a circuit would find it.
+ * Samples uniformly from the words orthogonal to what is hidden, the distribution that theory gives. It is TOLD the
+ * secret: its figures show what theory says, not that a circuit would find it.
  */
 public final class AnnihilatorEngine implements SightedEngine {
 
@@ -32,10 +34,21 @@ public final class AnnihilatorEngine implements SightedEngine {
     }
 
     @Override
-    public Optional<String> refusal(Problem problem, int width) {
-        return width <= WIDTH
-                ? Optional.empty()
-                : Optional.of("annihilator reaches width " + WIDTH + ", not " + width + "; no engine reaches it");
+    public Optional<String> refusal(Problem problem, int width, Circuit circuit) {
+        if (width > WIDTH) {
+            boolean affine = problem.promise().labels() == Promise.Labels.AFFINE;
+            return Optional.of("annihilator reaches width " + WIDTH + ", not " + width + "; "
+                    + (affine ? "engine stabilizer reaches it" : "no engine reaches it"));
+        }
+        if (!problem.promise().isExact() || problem.isPromiseBroken()) {
+            return Optional.of("annihilator samples what theory gives where the promise holds, and this one holds nearly"
+                    + " at best; engine weights takes any function");
+        }
+        if (problem.promise().question() == Question.CONSTANT_OR_BALANCED) {
+            return Optional.of("annihilator knows only whether the outcome is 0, which is the answer itself; engine"
+                    + " weights works from the function");
+        }
+        return Optional.empty();
     }
 
     @Override
@@ -45,30 +58,24 @@ public final class AnnihilatorEngine implements SightedEngine {
 
     @Override
     public Simulation open(Unitary unitary, Answer hidden) {
-        if (hidden instanceof Answer.Period period && period.s().width() == unitary.width()) {
-            return new Opened(unitary, period.s().bits());
+        if (hidden instanceof Answer.Mask mask && mask.a().width() == unitary.width()) {
+            return new ToldMask(unitary, mask.a().bits());
         }
-        throw new IllegalArgumentException("annihilator needs a period of " + unitary.width() + " bits: " + hidden);
+        return new ToldSubspace(unitary, rows(hidden, unitary.width()));
     }
 
-    private record Opened(Unitary unitary, long period) implements Simulation {
-
-        /** Draws y uniformly; if y·s = 1, flips in y the top set bit of s, which pairs the two halves one to one. */
-        @Override
-        public long fourierSample(RandomStream stream) {
-            unitary.use();
-            long y = stream.bits(unitary.width());
-            return (Long.bitCount(y & period) & 1) == 0 ? y : y ^ Long.highestOneBit(period);
+    private static long[] rows(Answer hidden, int width) {
+        List<Word> basis = List.of();
+        if (hidden instanceof Answer.Period period) {
+            basis = List.of(period.s());
+        } else if (hidden instanceof Answer.Subspace subspace) {
+            basis = subspace.basis();
+        } else if (!(hidden instanceof Answer.NoPeriod)) {
+            throw new IllegalArgumentException("annihilator needs a period, a subspace or a word: " + hidden);
         }
-
-        @Override
-        public Outcomes outcomes() {
-            Reach.requireListable(unitary.width());
-            long[] weights = new long[1 << unitary.width()];
-            for (int y = 0; y < weights.length; y++) {
-                weights[y] = 1L - (Long.bitCount(y & period) & 1);
-            }
-            return new Outcomes(weights);
+        if (basis.stream().anyMatch(word -> word.width() != width)) {
+            throw new IllegalArgumentException("annihilator needs words of " + width + " bits: " + hidden);
         }
+        return basis.stream().mapToLong(Word::bits).toArray();
     }
 }

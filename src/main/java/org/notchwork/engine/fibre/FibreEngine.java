@@ -2,7 +2,12 @@ package org.notchwork.engine.fibre;
 
 import java.util.Optional;
 import org.notchwork.bits.WalshHadamard;
+import org.notchwork.engine.Amplification;
 import org.notchwork.engine.BlindEngine;
+import org.notchwork.engine.Circuit;
+import org.notchwork.engine.Farther;
+import org.notchwork.engine.Fibres;
+import org.notchwork.engine.SignedTransform;
 import org.notchwork.engine.Measurement;
 import org.notchwork.engine.Outcomes;
 import org.notchwork.engine.Reach;
@@ -37,11 +42,11 @@ public final class FibreEngine implements BlindEngine {
     }
 
     @Override
-    public Optional<String> refusal(Problem problem, int width) {
+    public Optional<String> refusal(Problem problem, int width, Circuit circuit) {
         return width <= WIDTH
                 ? Optional.empty()
-                : Optional.of("fibre evaluates all 2^n points and reaches width " + WIDTH + ", not " + width
-                        + "; engine annihilator reaches width 63 but is sighted");
+                : Optional.of("fibre evaluates all 2^n points and reaches width " + WIDTH + ", not " + width + "; "
+                        + Farther.than(problem, width));
     }
 
     @Override
@@ -67,6 +72,7 @@ public final class FibreEngine implements BlindEngine {
 
         private final Unitary unitary;
         private Optional<Fibres> fibres = Optional.empty();
+        private Optional<Measurement> signed = Optional.empty();
 
         Opened(Unitary unitary) {
             this.unitary = unitary;
@@ -75,6 +81,10 @@ public final class FibreEngine implements BlindEngine {
         @Override
         public long fourierSample(RandomStream stream) {
             unitary.use();
+            return drawn(stream);
+        }
+
+        private long drawn(RandomStream stream) {
             if (fibres.isEmpty()) {
                 fibres = Optional.of(new Fibres(unitary));
             }
@@ -98,6 +108,48 @@ public final class FibreEngine implements BlindEngine {
         }
 
         /** Rejection takes about |F|² steps, a transform n · 2^n: the cheaper one is used. */
+        @Override
+        public long phaseSample(RandomStream stream) {
+            unitary.use();
+            if (signed.isEmpty()) {
+                signed = Optional.of(new Measurement(SignedTransform.weights(unitary)));
+            }
+            return signed.get().draw(stream);
+        }
+
+        @Override
+        public Outcomes phaseOutcomes() {
+            Reach.requireListable(unitary.width());
+            return new Outcomes(SignedTransform.weights(unitary));
+        }
+
+        /** Whether the test accepts is drawn first; then samples are drawn until one is on that side. */
+        @Override
+        public long amplifiedSample(long test, RandomStream stream) {
+            unitary.use();
+            unitary.useInverse();
+            unitary.use();
+            int wanted = amplification(test).isAccepted(stream) ? 1 : 0;
+            long y = drawn(stream);
+            while ((Long.bitCount(y & test) & 1) != wanted) {
+                y = drawn(stream);
+            }
+            return y;
+        }
+
+        @Override
+        public Outcomes amplifiedOutcomes(long test) {
+            return amplification(test).outcomes(outcomes(), test);
+        }
+
+        private Amplification amplification(long test) {
+            long equal = 0;
+            for (long x = 0; x < 1L << unitary.width(); x++) {
+                equal += unitary.image(x) == unitary.image(x ^ test) ? 1 : 0;
+            }
+            return new Amplification(unitary.width(), equal);
+        }
+
         private static boolean isSmall(int size, int width) {
             return (long) size * size <= (long) width << width;
         }

@@ -23,6 +23,15 @@ final class StateVector {
         this.amplitudes[0] = 1;
     }
 
+    /** Starts in |0…0⟩ beside |0⟩ − |1⟩ instead: an X and a Hadamard gate on the one value qubit. */
+    void startInValueOne() {
+        if (values != 1) {
+            throw new IllegalStateException(values + " value qubits");
+        }
+        amplitudes[0] = 1;
+        amplitudes[1] = -1;
+    }
+
     /** Applies a Hadamard gate, without its factor, to one qubit of the input register. */
     void hadamard(int qubit) {
         int half = 1 << (values + qubit);

@@ -2,6 +2,8 @@ package org.notchwork.engine.statevector;
 
 import java.util.Optional;
 import org.notchwork.engine.BlindEngine;
+import org.notchwork.engine.Circuit;
+import org.notchwork.engine.Farther;
 import org.notchwork.engine.Measurement;
 import org.notchwork.engine.Outcomes;
 import org.notchwork.engine.Reach;
@@ -17,6 +19,8 @@ public final class StateVectorEngine implements BlindEngine {
     public static final String NAME = "statevector";
 
     private static final int QUBITS = 26;
+    /** The amplified circuit has complex amplitudes of 16 bytes. */
+    private static final int AMPLIFIED_QUBITS = 22;
 
     @Override
     public String name() {
@@ -30,14 +34,13 @@ public final class StateVectorEngine implements BlindEngine {
     }
 
     @Override
-    public Optional<String> refusal(Problem problem, int width) {
-        if (2 * width <= QUBITS) {
-            return Optional.empty();
-        }
-        String other =
-                width <= 26 ? "engine fibre reaches width 26" : "engine annihilator reaches width 63 but is sighted";
-        return Optional.of(
-                "statevector holds " + QUBITS + " qubits and width " + width + " needs " + 2 * width + "; " + other);
+    public Optional<String> refusal(Problem problem, int width, Circuit circuit) {
+        int most = circuit == Circuit.AMPLIFIED ? AMPLIFIED_QUBITS : QUBITS;
+        int needed = circuit == Circuit.PHASE ? width + 1 : 2 * width;
+        return needed <= most
+                ? Optional.empty()
+                : Optional.of("statevector holds " + most + " qubits and width " + width + " needs " + needed + "; "
+                        + Farther.than(problem, width));
     }
 
     @Override
@@ -67,6 +70,7 @@ public final class StateVectorEngine implements BlindEngine {
 
         private final Unitary unitary;
         private Optional<Measurement> prepared = Optional.empty();
+        private Optional<Measurement> signed = Optional.empty();
 
         Opened(Unitary unitary) {
             this.unitary = unitary;
@@ -79,6 +83,71 @@ public final class StateVectorEngine implements BlindEngine {
                 prepared = Optional.of(new Measurement(weights()));
             }
             return prepared.get().draw(stream);
+        }
+
+        @Override
+        public long phaseSample(RandomStream stream) {
+            unitary.use();
+            if (signed.isEmpty()) {
+                signed = Optional.of(new Measurement(phaseWeights()));
+            }
+            return signed.get().draw(stream);
+        }
+
+        @Override
+        public Outcomes phaseOutcomes() {
+            Reach.requireListable(unitary.width());
+            return new Outcomes(phaseWeights());
+        }
+
+        /** The value qubit starts in |1⟩ and gets a Hadamard of its own; nothing else differs. */
+        private long[] phaseWeights() {
+            StateVector state = new StateVector(unitary.width(), unitary.valueWidth());
+            state.startInValueOne();
+            for (int qubit = 0; qubit < unitary.width(); qubit++) {
+                state.hadamard(qubit);
+            }
+            state.oracle(unitary::image);
+            for (int qubit = 0; qubit < unitary.width(); qubit++) {
+                state.hadamard(qubit);
+            }
+            return state.inputWeights();
+        }
+
+        @Override
+        public long amplifiedSample(long test, RandomStream stream) {
+            unitary.use();
+            unitary.useInverse();
+            unitary.use();
+            return new Measurement(amplifiedWeights(test)).draw(stream);
+        }
+
+        @Override
+        public Outcomes amplifiedOutcomes(long test) {
+            Reach.requireListable(unitary.width());
+            return new Outcomes(amplifiedWeights(test));
+        }
+
+        /** A, i on the accepted words, the inverse of A, which is A, i on |0…0⟩|0…0⟩, A: gate by gate. */
+        private long[] amplifiedWeights(long test) {
+            ComplexState state = new ComplexState(unitary.width(), unitary.valueWidth());
+            sampling(state);
+            state.phaseIfOdd(test);
+            sampling(state);
+            state.phaseAtZero();
+            sampling(state);
+            return state.inputWeights();
+        }
+
+        private void sampling(ComplexState state) {
+            for (int qubit = 0; qubit < unitary.width(); qubit++) {
+                state.hadamard(qubit);
+            }
+            state.oracle(unitary::image);
+            for (int qubit = 0; qubit < unitary.width(); qubit++) {
+                state.hadamard(qubit);
+            }
+            state.reduce();
         }
 
         @Override

@@ -8,6 +8,7 @@ import org.notchwork.problem.Answer;
 import org.notchwork.problem.BitFunction;
 import org.notchwork.problem.Instance;
 import org.notchwork.problem.Problem;
+import org.notchwork.problem.Promise;
 import org.notchwork.seed.RandomStream;
 
 /**
@@ -43,6 +44,11 @@ public record XorPeriod(Labelling labelling) implements Problem {
     public String description() {
         return "xor-period: f(x) = f(y) exactly if y is x or x xor s, s not 0; find s (" + labelling.word()
                 + " instances)";
+    }
+
+    @Override
+    public Promise promise() {
+        return Promise.period(Promise.Labels.RANDOM);
     }
 
     @Override
@@ -87,11 +93,7 @@ public record XorPeriod(Labelling labelling) implements Problem {
         if (width < leastWidth() || width > greatestWidth()) {
             throw new IllegalArgumentException("width " + width + " is not in 2 to " + greatestWidth());
         }
-        Cosets cosets = new Cosets(width, period);
-        BitFunction function = switch (labelling) {
-            case TABLE -> new TableFunction(cosets, stream);
-            case PERMUTATION -> new PermutationFunction(cosets, stream);
-        };
+        BitFunction function = labelling.label(new Cosets(width, period), stream);
         return new Instance(function, new Answer.Period(Word.of(width, period)));
     }
 }

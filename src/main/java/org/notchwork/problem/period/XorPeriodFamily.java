@@ -1,10 +1,8 @@
 package org.notchwork.problem.period;
 
-import java.util.Arrays;
-import java.util.List;
 import java.util.Optional;
 import org.notchwork.json.Fields;
-import org.notchwork.json.Spelling;
+import org.notchwork.problem.Attachments;
 import org.notchwork.problem.Family;
 import org.notchwork.problem.Problem;
 
@@ -20,16 +18,7 @@ public final class XorPeriodFamily implements Family {
     }
 
     @Override
-    public Problem configure(Fields settings) {
-        Optional<String> word = settings.optionalText("instances", 1, 40);
-        List<String> words =
-                Arrays.stream(Labelling.values()).map(Labelling::word).toList();
-        if (word.isPresent() && !word.get().isEmpty() && !words.contains(word.get())) {
-            settings.fault("instances", Fields.quoted(word.get()), Spelling.mend(word.get(), words));
-        }
-        return new XorPeriod(
-                word.filter(Labelling.PERMUTATION.word()::equals).isPresent()
-                        ? Labelling.PERMUTATION
-                        : Labelling.TABLE);
+    public Optional<Problem> configure(Fields settings, Attachments files) {
+        return Optional.of(new XorPeriod(Labelling.read(settings)));
     }
 }

@@ -51,6 +51,11 @@ public final class DifferenceCover implements PeriodByCollision {
         }
 
         @Override
+        public boolean isDone() {
+            return next == end;
+        }
+
+        @Override
         public long next() {
             if (next == end) {
                 return SeenValues.NONE;

@@ -39,6 +39,17 @@ final class SeenValues {
         return NONE;
     }
 
+    /** Returns where a value was seen, {@link #NONE} if it was not. */
+    long find(long value) {
+        int slot = slot(value, values);
+        return values[slot] == 0 ? NONE : points[slot];
+    }
+
+    /** Returns how many values were noted. */
+    int size() {
+        return size;
+    }
+
     /** Returns how many words of memory the slots take. */
     long memoryWords() {
         return 2L * values.length;

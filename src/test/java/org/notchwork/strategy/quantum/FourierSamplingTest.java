@@ -7,7 +7,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
-import org.notchwork.check.CertificateCheck;
+import org.notchwork.certificate.CertificateCheck;
 import org.notchwork.engine.annihilator.AnnihilatorEngine;
 import org.notchwork.engine.fibre.FibreEngine;
 import org.notchwork.problem.BitFunction;

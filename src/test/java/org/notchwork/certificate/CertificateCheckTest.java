@@ -1,4 +1,4 @@
-package org.notchwork.check;
+package org.notchwork.certificate;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 

@@ -1,4 +1,4 @@
-package org.notchwork.engine.fibre;
+package org.notchwork.engine;
 
 import java.util.Arrays;
 import org.notchwork.problem.Unitary;
@@ -9,11 +9,12 @@ import org.notchwork.problem.Unitary;
  * <p>Each entry holds a value in its high half and a point in its low half, sorted, so that a fibre is a run of
  * entries. Points of at most 26 bits, values of at most 31.
  */
-final class Fibres {
+public final class Fibres {
 
     private final long[] entries;
 
-    Fibres(Unitary unitary) {
+    /** Evaluates the function of a unitary everywhere; nothing is counted. */
+    public Fibres(Unitary unitary) {
         entries = new long[1 << unitary.width()];
         for (int x = 0; x < entries.length; x++) {
             entries[x] = unitary.image(x) << 32 | x;
@@ -22,7 +23,7 @@ final class Fibres {
     }
 
     /** Returns the points with this value, ascending. */
-    int[] of(long value) {
+    public int[] of(long value) {
         int start = from(value);
         int end = start;
         while (end < entries.length && entries[end] >>> 32 == value) {
@@ -32,7 +33,7 @@ final class Fibres {
     }
 
     /** Returns the points from one fibre's first entry on, given where it starts. */
-    int[] startingAt(int start) {
+    public int[] startingAt(int start) {
         int end = start;
         while (end < entries.length && entries[end] >>> 32 == entries[start] >>> 32) {
             end++;
@@ -41,7 +42,7 @@ final class Fibres {
     }
 
     /** Returns the number of points of the domain. */
-    int size() {
+    public int size() {
         return entries.length;
     }
 
