@@ -255,7 +255,7 @@ class BinomialTailTest {
         assertEquals(BigDecimal.ZERO, BinomialTail.atLeast(1, 0, new BigDecimal("0.5")));
     }
 
-    /** It takes a tenth of a second; the bound is to catch a walk over all counts, which takes more than ten. */
+    /** Some hundredths of a second; the bound is far above, and there to catch a walk over all counts. */
     @Test
     void tenMillionTrialsTakeNoTime() {
         BigDecimal p = Decimals.quotient(1, 3);
