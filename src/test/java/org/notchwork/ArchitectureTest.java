@@ -20,6 +20,8 @@ import org.junit.jupiter.api.DynamicTest;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.TestFactory;
 import org.notchwork.engine.BlindEngine;
+import org.notchwork.engine.Circuit;
+import org.notchwork.engine.Noise;
 import org.notchwork.engine.SightedEngine;
 import org.notchwork.engine.Simulation;
 import org.notchwork.problem.Answer;
@@ -42,6 +44,7 @@ class ArchitectureTest {
             "bits",
             "seed",
             "problem",
+            "certificate",
             "engine",
             "strategy",
             "law",
@@ -128,7 +131,7 @@ class ArchitectureTest {
                 .that()
                 .resideInAPackage("org.notchwork.engine..")
                 .should()
-                .accessTargetWhere(method(Problem.class, "draw", "drawHiding", "answers"))
+                .accessTargetWhere(method(Problem.class, "draw", "drawHiding", "answers", "control"))
                 .check(HOUSE);
     }
 
@@ -154,12 +157,15 @@ class ArchitectureTest {
     }
 
     @Test
-    void aStrategyKnowsOfEnginesOnlyTheOpenedSimulation() {
+    void aStrategyKnowsOfEnginesOnlyTheOpenedSimulationItsCircuitAndItsNoise() {
         noClasses()
                 .that()
                 .resideInAPackage("org.notchwork.strategy..")
                 .should()
-                .dependOnClassesThat(resideInAPackage("org.notchwork.engine..").and(not(type(Simulation.class))))
+                .dependOnClassesThat(resideInAPackage("org.notchwork.engine..")
+                        .and(not(type(Simulation.class)))
+                        .and(not(type(Circuit.class)))
+                        .and(not(type(Noise.class))))
                 .check(HOUSE);
     }
 
@@ -170,9 +176,9 @@ class ArchitectureTest {
                 .that()
                 .resideInAPackage("org.notchwork.strategy..")
                 .should()
-                .accessTargetWhere(method(Simulation.class, "outcomes"))
+                .accessTargetWhere(method(Simulation.class, "outcomes", "phaseOutcomes", "amplifiedOutcomes"))
                 .orShould()
-                .accessTargetWhere(method(Problem.class, "draw", "drawHiding", "answers"))
+                .accessTargetWhere(method(Problem.class, "draw", "drawHiding", "answers", "control"))
                 .check(HOUSE);
     }
 

@@ -175,7 +175,8 @@ final class CertificateForm {
     }
 
     private static JsonArray pairs(List<Pair> pairs) {
-        return new JsonArray(pairs.stream().<JsonValue>map(CertificateForm::pair).toList());
+        return new JsonArray(
+                pairs.stream().<JsonValue>map(CertificateForm::pair).toList());
     }
 
     private static JsonObject pair(Pair pair) {

@@ -55,8 +55,7 @@ public final class ControlLine {
         }
         Counts counts = TrialLine.counts(fields.object("calls"));
         Optional<Answer> secret = AnswerForm.read(fields.object("secret"), width);
-        Optional<Answer> answer =
-                fields.optionalObject("answer").flatMap(f -> AnswerForm.read(f, width));
+        Optional<Answer> answer = fields.optionalObject("answer").flatMap(f -> AnswerForm.read(f, width));
         Optional<Certificate> certificate =
                 fields.optionalObject("certificate").flatMap(f -> CertificateForm.read(f, width));
         fields.end();

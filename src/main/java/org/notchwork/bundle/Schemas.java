@@ -15,7 +15,7 @@ public final class Schemas {
 
     /** The names of the schemas; each is a file {@code NAME.schema.json} beside the program. */
     public static final List<String> NAMES =
-            List.of("claims", "cross-checks", "environment", "seal", "study", "summary", "trial");
+            List.of("claims", "control", "cross-checks", "environment", "seal", "study", "summary", "trial");
 
     private Schemas() {}
 

@@ -104,10 +104,10 @@ public final class SummaryReader {
 
     private static List<FunctionFigures> functions(Fields fields) {
         List<FunctionFigures> figures = new ArrayList<>();
-        for (Fields.Item item : fields.optionalItems("by-function", 1, MOST_PARTS).orElse(List.of())) {
+        for (Fields.Item item :
+                fields.optionalItems("by-function", 1, MOST_PARTS).orElse(List.of())) {
             Fields one = item.object();
-            figures.add(
-                    new FunctionFigures(one.text("function", 1, LONGEST), decimal(one, "mean"), count(one, "max")));
+            figures.add(new FunctionFigures(one.text("function", 1, LONGEST), decimal(one, "mean"), count(one, "max")));
             one.end();
         }
         return figures;

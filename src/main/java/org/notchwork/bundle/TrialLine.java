@@ -56,7 +56,8 @@ public final class TrialLine {
                 .put("sight", choice.sight());
         if (!record.byFunction().isEmpty()) {
             JsonArray each = new JsonArray(IntStream.range(0, functions.size())
-                    .<JsonValue>mapToObj(i -> named(functions.get(i), record.byFunction().get(i)))
+                    .<JsonValue>mapToObj(
+                            i -> named(functions.get(i), record.byFunction().get(i)))
                     .toList());
             line.put("calls-by-function", each);
         }
@@ -138,7 +139,8 @@ public final class TrialLine {
 
     private static List<Counts> byFunction(Fields fields, Counts all) {
         List<Counts> each = new ArrayList<>();
-        for (Fields.Item item : fields.optionalItems("calls-by-function", 2, MOST_FUNCTIONS).orElse(List.of())) {
+        for (Fields.Item item :
+                fields.optionalItems("calls-by-function", 2, MOST_FUNCTIONS).orElse(List.of())) {
             Fields one = item.object();
             one.text("function", 1, LONGEST_LABEL);
             each.add(counts(one));

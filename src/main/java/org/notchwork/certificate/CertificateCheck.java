@@ -106,9 +106,7 @@ public final class CertificateCheck {
         return words.size() == width && rank == width
                 ? Optional.empty()
                 : Optional.of(new Wrong(
-                        "/spanning/words",
-                        words.size() + " words of rank " + rank,
-                        width + " independent words"));
+                        "/spanning/words", words.size() + " words of rank " + rank, width + " independent words"));
     }
 
     private Optional<Wrong> subspace(List<Word> basis, Certificate certificate) {
@@ -140,7 +138,9 @@ public final class CertificateCheck {
         return rank == basis.size() && rank(all) == rank && pairs.size() == rank
                 ? Optional.empty()
                 : Optional.of(new Wrong(
-                        "/collisions", pairs.size() + " pairs of rank " + rank, "pairs whose sums are a basis of the answer"));
+                        "/collisions",
+                        pairs.size() + " pairs of rank " + rank,
+                        "pairs whose sums are a basis of the answer"));
     }
 
     private Optional<Wrong> confirmations(List<Word> basis, List<Pair> pairs) {
@@ -156,8 +156,8 @@ public final class CertificateCheck {
         }
         return pairs.size() == basis.size()
                 ? Optional.empty()
-                : Optional.of(new Wrong(
-                        "/annihilators/confirmations", pairs.size() + " pairs", basis.size() + " pairs"));
+                : Optional.of(
+                        new Wrong("/annihilators/confirmations", pairs.size() + " pairs", basis.size() + " pairs"));
     }
 
     private Optional<Wrong> mask(Word a) {
@@ -169,7 +169,9 @@ public final class CertificateCheck {
             boolean isSet = (function.at(1L << i) ^ atZero) == 1;
             if (isSet != a.value().testBit(i)) {
                 return Optional.of(new Wrong(
-                        "", a.hex(), "a word whose bit " + i + " is " + (isSet ? 1 : 0) + ", as the values at 0 and 2^" + i
+                        "",
+                        a.hex(),
+                        "a word whose bit " + i + " is " + (isSet ? 1 : 0) + ", as the values at 0 and 2^" + i
                                 + " say"));
             }
         }
@@ -184,10 +186,11 @@ public final class CertificateCheck {
             return unfit(certificate, isBalanced ? "a difference or none" : "none");
         }
         Pair pair = difference.pair();
-        return widths(pair.x(), pair, "/difference").or(() -> values(pair, "/difference")).or(() -> pair.fx()
-                        .equals(pair.fy())
-                ? Optional.of(new Wrong("/difference/fy", pair.fy().hex(), "another value"))
-                : Optional.empty());
+        return widths(pair.x(), pair, "/difference")
+                .or(() -> values(pair, "/difference"))
+                .or(() -> pair.fx().equals(pair.fy())
+                        ? Optional.of(new Wrong("/difference/fy", pair.fy().hex(), "another value"))
+                        : Optional.empty());
     }
 
     /** A word of another width than the function's cannot even be compared. */
@@ -236,7 +239,8 @@ public final class CertificateCheck {
             }
             return pair.collides()
                     ? Optional.empty()
-                    : Optional.of(new Wrong(at + "/fy", pair.fy().hex(), pair.fx().hex()));
+                    : Optional.of(
+                            new Wrong(at + "/fy", pair.fy().hex(), pair.fx().hex()));
         });
     }
 
@@ -265,8 +269,7 @@ public final class CertificateCheck {
         int rank = rank(words);
         int wanted = width - hidden.size();
         if (words.size() != wanted || rank != wanted) {
-            return Optional.of(
-                    new Wrong(at, words.size() + " words of rank " + rank, wanted + " independent words"));
+            return Optional.of(new Wrong(at, words.size() + " words of rank " + rank, wanted + " independent words"));
         }
         return Optional.empty();
     }

@@ -15,7 +15,17 @@ public enum CheckKind {
     /** The query count of every trial of a deterministic strategy equals its closed form. */
     CLOSED_FORM("query count of every trial against its closed form", "closed form of the law", false),
     /** The observed mean lies within five standard errors of the exact expectation. */
-    THEORY_MEAN("observed mean against the exact expectation", "the law of the strategy", false);
+    THEORY_MEAN("observed mean against the exact expectation", "the law of the strategy", false),
+    /** Accidental collisions are counted on the whole domain, and instances with a second exact period named. */
+    ACCIDENTS("accidental collisions and second periods, counted", "exhaustive search, written apart", true),
+    /** The observed distribution of query counts fits the exact one: chi-squared, corrected by Holm. */
+    QUERY_DISTRIBUTION("distribution of query counts against the exact one", "the law of the strategy", false),
+    /** The observed rate of right answers fits the exact probability: binomial, corrected by Holm. */
+    SUCCESS_RATE("observed success rate against the exact probability", "the law of the strategy", false),
+    /** No classical strategy succeeds within m queries more often than C(m, 2)/(2^n − 1), beyond chance. */
+    CLASSICAL_BOUND("success within m queries against what no classical strategy can beat", "derived: see law", false),
+    /** What is hidden is not named where it is not there, beyond chance. */
+    CONTROL("how often a control names what it cannot have found, against guessing", "counting", false);
 
     private final String statement;
     private final String source;

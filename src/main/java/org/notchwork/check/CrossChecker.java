@@ -5,12 +5,10 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import org.notchwork.catalogue.Laws;
+import java.util.stream.Collectors;
 import org.notchwork.figure.CellFigures;
 import org.notchwork.figure.Summary;
-import org.notchwork.law.QueryLaw;
 import org.notchwork.seed.SeedTree;
-import org.notchwork.strategy.ClassicalStrategy;
 import org.notchwork.study.Cell;
 import org.notchwork.study.Experiment;
 import org.notchwork.study.StrategyChoice;
@@ -35,9 +33,10 @@ public final class CrossChecker {
     public List<CrossCheck> fromLines(LineChecks lines, Summary summary) {
         List<CrossCheck> checks = new ArrayList<>();
         Map<Cell, CellFigures> figures = byCell(summary);
+        StatisticalChecks statistical = new StatisticalChecks(study, lines, figures);
         for (Experiment experiment : study.experiments()) {
             for (int width : experiment.widths()) {
-                fromLines(experiment, width, lines, figures, checks);
+                fromLines(experiment, width, lines, figures, statistical, checks);
             }
         }
         return checks;
@@ -53,13 +52,14 @@ public final class CrossChecker {
     public List<CrossCheck> all(Map<String, InstanceTally> examined, LineChecks lines, Summary summary) {
         List<CrossCheck> checks = new ArrayList<>();
         Map<Cell, CellFigures> figures = byCell(summary);
+        StatisticalChecks statistical = new StatisticalChecks(study, lines, figures);
         for (Experiment experiment : study.experiments()) {
             for (int width : experiment.widths()) {
                 if (isExhaustive(study, width)) {
                     InstanceTally tally = examined.getOrDefault(subject(experiment.id(), width), InstanceTally.NONE);
                     exhaustive(experiment, width, tally, checks);
                 }
-                fromLines(experiment, width, lines, figures, checks);
+                fromLines(experiment, width, lines, figures, statistical, checks);
             }
         }
         return checks;
@@ -90,7 +90,10 @@ public final class CrossChecker {
         String subject = subject(experiment.id(), width);
         called.add(new Called(CheckKind.PROMISE, subject));
         called.add(new Called(CheckKind.EXHAUSTIVE_ANSWER, subject));
-        onAllSecrets(experiment)
+        if (!experiment.problem().promise().isExact()) {
+            called.add(new Called(CheckKind.ACCIDENTS, subject));
+        }
+        onAllSecrets(experiment, width)
                 .forEach(choice -> called.add(
                         new Called(CheckKind.ALL_SECRETS, new Cell(experiment.id(), width, choice.label()).id())));
         if (hasEngines(experiment)) {
@@ -105,38 +108,46 @@ public final class CrossChecker {
 
     private void exhaustive(Experiment experiment, int width, InstanceTally tally, List<CrossCheck> checks) {
         String subject = subject(experiment.id(), width);
-        checks.add(check(
-                CheckKind.PROMISE,
-                subject,
-                tally.promise(),
-                "in every instance every value has two inputs, and they differ by the hidden period"));
-        checks.add(check(
-                CheckKind.EXHAUSTIVE_ANSWER,
-                subject,
-                tally.answers(),
-                "the hidden answer of every instance and every answer given equal what search finds"));
+        PromiseText text = new PromiseText(experiment.problem());
+        checks.add(check(CheckKind.PROMISE, subject, tally.promise(), text.promise()));
+        checks.add(check(CheckKind.EXHAUSTIVE_ANSWER, subject, tally.answers(), text.answers()));
+        if (!experiment.problem().promise().isExact()) {
+            checks.add(accidents(subject, tally));
+        }
         AllSecrets allSecrets = new AllSecrets(new SeedTree(study.seed()));
-        for (StrategyChoice choice : onAllSecrets(experiment)) {
+        for (StrategyChoice choice : onAllSecrets(experiment, width)) {
             String cell = new Cell(experiment.id(), width, choice.label()).id();
-            ClassicalStrategy strategy = (ClassicalStrategy) choice.strategy();
             checks.add(allSecrets.check(
-                    experiment, width, cell, strategy, law(experiment, choice).orElseThrow()));
+                    experiment,
+                    width,
+                    cell,
+                    choice,
+                    choice.law(experiment.problem()).orElseThrow()));
         }
         if (hasEngines(experiment)) {
-            checks.add(check(
-                    CheckKind.ENGINES,
-                    subject,
-                    tally.engines(),
-                    "every engine gives 2^(1-n) to each word orthogonal to the period and 0 to the others, exactly"
-                            + sample(experiment, width)));
+            checks.add(check(CheckKind.ENGINES, subject, tally.engines(), text.engines() + sample(experiment, width)));
         }
     }
 
-    /** Returns the strategies whose closed form holds for every secret, so that all are run. */
-    private static List<StrategyChoice> onAllSecrets(Experiment experiment) {
+    private static CrossCheck accidents(String subject, InstanceTally tally) {
+        String ambiguous = tally.ambiguous().isEmpty()
+                ? "; no instance has a second exact period"
+                : "; a second exact period in trials "
+                        + tally.ambiguous().stream().map(t -> Long.toString(t)).collect(Collectors.joining(", "));
+        return new CrossCheck(
+                CheckKind.ACCIDENTS,
+                subject,
+                tally.promise().compared(),
+                "counted, not judged: pairs of inputs with one value that no exact period explains",
+                tally.accidents() + " pairs" + ambiguous,
+                Optional.empty(),
+                tally.promise().compared() == 0 ? CheckOutcome.NOT_COMPARABLE : CheckOutcome.AGREES);
+    }
+
+    /** Returns the strategies that are run on everything that can be hidden. */
+    private static List<StrategyChoice> onAllSecrets(Experiment experiment, int width) {
         return experiment.strategies().stream()
-                .filter(c -> c.strategy() instanceof ClassicalStrategy s && s.deterministic())
-                .filter(c -> law(experiment, c).isPresent())
+                .filter(c -> AllSecrets.applies(experiment, width, c))
                 .toList();
     }
 
@@ -155,13 +166,17 @@ public final class CrossChecker {
             int width,
             LineChecks lines,
             Map<Cell, CellFigures> figures,
+            StatisticalChecks statistical,
             List<CrossCheck> checks) {
         for (StrategyChoice choice : experiment.strategies()) {
             lines.check(new Cell(experiment.id(), width, choice.label())).ifPresent(checks::add);
         }
         for (StrategyChoice choice : experiment.strategies()) {
             CellFigures cell = figures.get(new Cell(experiment.id(), width, choice.label()));
-            law(experiment, choice).ifPresent(law -> checks.add(TheoryMean.check(cell, law)));
+            choice.law(experiment.problem()).ifPresent(law -> checks.add(TheoryMean.check(cell, law)));
+        }
+        for (StrategyChoice choice : experiment.strategies()) {
+            checks.addAll(statistical.of(new Cell(experiment.id(), width, choice.label())));
         }
     }
 
@@ -174,10 +189,6 @@ public final class CrossChecker {
                 comparison.text(),
                 Optional.empty(),
                 comparison.outcome());
-    }
-
-    private static Optional<QueryLaw> law(Experiment experiment, StrategyChoice choice) {
-        return Laws.law(experiment.problem().kind(), choice.strategy().name());
     }
 
     private static Map<Cell, CellFigures> byCell(Summary summary) {

@@ -1,18 +1,25 @@
 package org.notchwork.check;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
-import org.notchwork.bits.Word;
+import java.util.stream.Collectors;
 import org.notchwork.engine.BlindEngine;
+import org.notchwork.engine.Circuit;
 import org.notchwork.engine.Engine;
 import org.notchwork.engine.Outcomes;
 import org.notchwork.engine.SightedEngine;
 import org.notchwork.engine.Simulation;
 import org.notchwork.problem.Answer;
+import org.notchwork.problem.AnswerText;
 import org.notchwork.problem.Instance;
 import org.notchwork.problem.Meter;
+import org.notchwork.problem.Problem;
 import org.notchwork.problem.Unitary;
+import org.notchwork.strategy.QuantumStrategy;
 import org.notchwork.study.Experiment;
+import org.notchwork.study.StrategyChoice;
+import org.notchwork.trial.Outcome;
 import org.notchwork.trial.TrialGroup;
 import org.notchwork.trial.TrialRecord;
 
@@ -42,29 +49,63 @@ public final class InstanceExaminer {
      * @param group what the strategies made of it
      */
     public InstanceTally examine(Experiment experiment, Instance instance, TrialGroup group) {
-        ExhaustiveSearch.Found found = ExhaustiveSearch.search(instance.function());
-        if (found instanceof ExhaustiveSearch.Found.Broken broken) {
-            Comparison differed = Comparison.differed(
-                    "trial " + group.trial() + ": inputs " + broken.x() + " and " + broken.y() + ": " + broken.why());
+        Problem problem = experiment.problem();
+        ExhaustiveAnswer.Found found = ExhaustiveAnswer.search(instance.function(), problem.promise());
+        String trial = "trial " + group.trial() + ": ";
+        if (found instanceof ExhaustiveAnswer.Found.Broken broken) {
+            if (problem.isPromiseBroken()) {
+                return new InstanceTally(Comparison.agreed(), Comparison.NONE, engines(experiment, instance, group));
+            }
+            Comparison differed = Comparison.differed(trial + broken.why());
             return new InstanceTally(differed, differed, Comparison.NONE);
         }
-        long period = ((ExhaustiveSearch.Found.Period) found).s();
-        Answer searched = new Answer.Period(Word.of(group.width(), period));
-        Comparison hidden = searched.equals(instance.hidden())
+        ExhaustiveAnswer.Found.Right right = (ExhaustiveAnswer.Found.Right) found;
+        if (problem.isPromiseBroken()) {
+            Comparison differed = Comparison.differed(trial + "the promise is said to be broken and holds");
+            return new InstanceTally(differed, differed, Comparison.NONE);
+        }
+        Comparison hidden = right.answers().contains(instance.hidden())
                 ? Comparison.agreed()
-                : Comparison.differed(
-                        "trial " + group.trial() + ": search finds period " + period + ", another one is hidden");
+                : Comparison.differed(trial + "search finds " + texts(right.answers()) + ", another one is hidden");
         Comparison answers = hidden;
         for (TrialRecord record : group.records()) {
-            if (record.answer().isPresent()) {
-                answers = answers.plus(answer(record, searched));
+            // Where the promise is exact, search has one answer; the outcome says which answers it was not.
+            if (record.answer().isPresent() && (isChecked(experiment, record) || record.outcome() == Outcome.SOLVED)) {
+                answers = answers.plus(answer(record, right.answers()));
             }
         }
-        return new InstanceTally(hidden, answers, engines(experiment, instance, group.trial(), period));
+        return new InstanceTally(
+                hidden,
+                answers,
+                engines(experiment, instance, group),
+                right.accidents(),
+                right.answers().size() > 1 ? List.of(group.trial()) : List.of());
     }
 
-    private static Comparison answer(TrialRecord record, Answer searched) {
-        return record.answer().filter(searched::equals).isPresent()
+    /** A strategy that may err by design is held to its outcome, not to being right. */
+    private static boolean isChecked(Experiment experiment, TrialRecord record) {
+        return experiment
+                .choice(record.cell().label())
+                .map(c -> !mayErr(experiment.problem(), c))
+                .orElse(true);
+    }
+
+    private static boolean mayErr(Problem problem, StrategyChoice choice) {
+        return choice.successLaw(problem).isPresent()
+                || !choice.noise().isNone()
+                || !problem.promise().isExact();
+    }
+
+    private static String texts(List<Answer> answers) {
+        return answers.stream().map(InstanceExaminer::text).collect(Collectors.joining(" and "));
+    }
+
+    private static String text(Answer answer) {
+        return answer instanceof Answer.Period period ? "period " + period.s().value() : AnswerText.of(answer);
+    }
+
+    private static Comparison answer(TrialRecord record, List<Answer> searched) {
+        return record.answer().filter(searched::contains).isPresent()
                 ? Comparison.agreed()
                 : Comparison.differed(
                         "trial " + record.trial() + ": " + record.cell().label() + " answers otherwise");
@@ -75,17 +116,32 @@ public final class InstanceExaminer {
         return width > ALL_INSTANCES_WIDTH && experiment.trials() > FIRST_INSTANCES;
     }
 
-    private Comparison engines(Experiment experiment, Instance instance, long trial, long period) {
+    private Comparison engines(Experiment experiment, Instance instance, TrialGroup group) {
         int width = instance.function().width();
-        boolean quantum =
-                experiment.strategies().stream().anyMatch(s -> s.engine().isPresent());
-        if (!quantum || (width > ALL_INSTANCES_WIDTH && trial >= FIRST_INSTANCES)) {
+        if (width > ALL_INSTANCES_WIDTH && group.trial() >= FIRST_INSTANCES) {
             return Comparison.NONE;
         }
         Comparison comparison = Comparison.NONE;
+        for (Circuit circuit : circuits(experiment)) {
+            comparison = comparison.plus(engines(experiment, instance, group.trial(), circuit));
+        }
+        return comparison;
+    }
+
+    /** Returns the circuits that the strategies of an experiment run. */
+    private static List<Circuit> circuits(Experiment experiment) {
+        return Arrays.stream(Circuit.values())
+                .filter(circuit -> experiment.strategies().stream()
+                        .anyMatch(c -> c.strategy() instanceof QuantumStrategy q && q.circuit() == circuit))
+                .toList();
+    }
+
+    private Comparison engines(Experiment experiment, Instance instance, long trial, Circuit circuit) {
+        Comparison comparison = Comparison.NONE;
         for (Engine engine : compared(experiment)) {
-            if (engine.refusal(experiment.problem(), width).isEmpty()) {
-                long wrong = wrongWords(open(engine, instance).outcomes(), period);
+            if (engine.refusal(experiment.problem(), instance.function().width(), circuit)
+                    .isEmpty()) {
+                long wrong = wrongWords(experiment, instance, engine, circuit);
                 comparison = comparison.plus(
                         wrong == 0
                                 ? Comparison.agreed()
@@ -94,6 +150,43 @@ public final class InstanceExaminer {
             }
         }
         return comparison;
+    }
+
+    private static long wrongWords(Experiment experiment, Instance instance, Engine engine, Circuit circuit) {
+        Simulation simulation = open(engine, instance);
+        if (circuit == Circuit.PHASE) {
+            return simulation.phaseOutcomes().differences(CircuitWeights.phase(instance.function()));
+        }
+        boolean exactPeriod = instance.hidden() instanceof Answer.Period
+                && experiment.problem().promise().isExact();
+        if (circuit == Circuit.FOURIER && exactPeriod) {
+            return wrongWords(simulation.outcomes(), period(instance));
+        }
+        if (circuit == Circuit.FOURIER) {
+            return simulation.outcomes().differences(CircuitWeights.fourier(instance.function()));
+        }
+        return wrongAmplified(simulation, instance);
+    }
+
+    private static long period(Instance instance) {
+        return ((Answer.Period) instance.hidden()).s().bits();
+    }
+
+    /** Three tests: the period, which accepts nothing, and two words that are not the period and split in half. */
+    private static long wrongAmplified(Simulation simulation, Instance instance) {
+        long period = period(instance);
+        long wrong = 0;
+        for (long test : new long[] {period, period == 1 ? 2 : 1, period == 3 ? 2 : 3}) {
+            Outcomes outcomes = simulation.amplifiedOutcomes(test);
+            long accepted = test == period ? outcomes.size() / 2 : outcomes.size() / 4;
+            for (int y = 0; y < outcomes.size(); y++) {
+                boolean possible =
+                        (Long.bitCount(y & period) & 1) == 0 && (test == period || (Long.bitCount(y & test) & 1) == 1);
+                long expected = possible ? outcomes.total() : 0;
+                wrong += Math.multiplyExact(outcomes.weight(y), accepted) == expected ? 0 : 1;
+            }
+        }
+        return wrong;
     }
 
     /** The engines that are always compared, then those that the experiment names besides. */

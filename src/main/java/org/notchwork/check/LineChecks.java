@@ -4,7 +4,6 @@ import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalLong;
-import org.notchwork.catalogue.Laws;
 import org.notchwork.law.QueryLaw;
 import org.notchwork.problem.Answer;
 import org.notchwork.study.Cell;
@@ -23,15 +22,18 @@ public final class LineChecks {
     private final Map<Cell, QueryLaw> laws = new LinkedHashMap<>();
     private final Map<Cell, Comparison> found = new LinkedHashMap<>();
 
+    private final Map<Cell, QueryCounts> counts = new LinkedHashMap<>();
+    private final boolean keepsCounts;
+
     /** Starts with no trials. */
     public LineChecks(Study study) {
+        this.keepsCounts = study.hasFullChecks();
         for (Experiment experiment : study.experiments()) {
             for (Cell cell : experiment.cells()) {
                 experiment
                         .choice(cell.label())
                         .filter(c -> c.strategy().deterministic())
-                        .flatMap(c -> Laws.law(
-                                experiment.problem().kind(), c.strategy().name()))
+                        .flatMap(c -> c.law(experiment.problem()))
                         .ifPresent(law -> {
                             laws.put(cell, law);
                             found.put(cell, Comparison.NONE);
@@ -43,15 +45,18 @@ public final class LineChecks {
     /** Adds one instance faced by every strategy of its experiment. */
     public void add(TrialGroup group) {
         for (TrialRecord record : group.records()) {
+            if (keepsCounts) {
+                counts.computeIfAbsent(record.cell(), c -> new QueryCounts()).add(record);
+            }
             Optional.ofNullable(laws.get(record.cell())).ifPresent(law -> add(record, law));
         }
     }
 
     private void add(TrialRecord record, QueryLaw law) {
-        if (record.outcome() == Outcome.CENSORED || !(record.hidden() instanceof Answer.Period period)) {
+        if (record.outcome() == Outcome.CENSORED) {
             return;
         }
-        OptionalLong expected = law.queries(record.cell().width(), period.s().bits());
+        OptionalLong expected = law.queries(record.cell().width(), key(record.hidden()));
         long counted = record.counts().queries();
         if (expected.isEmpty()) {
             return;
@@ -61,6 +66,18 @@ public final class LineChecks {
                 : Comparison.differed(
                         "trial " + record.trial() + ": " + counted + " queries, not " + expected.getAsLong());
         found.merge(record.cell(), one, Comparison::plus);
+    }
+
+    /** Laws that depend on what is hidden are about periods of at most 63 bits; to the others it is all the same. */
+    private static long key(Answer hidden) {
+        return hidden instanceof Answer.Period period && period.s().width() < Long.SIZE
+                ? period.s().bits()
+                : 0;
+    }
+
+    /** Returns how often each number of queries occurred in a cell of a study with full checks. */
+    QueryCounts counts(Cell cell) {
+        return counts.getOrDefault(cell, new QueryCounts());
     }
 
     /** Returns the check of a cell; empty if its strategy has no closed form. */

@@ -5,8 +5,10 @@ import java.nio.file.Files;
 import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Optional;
 import org.notchwork.json.JsonLimits;
 import org.notchwork.json.Printable;
+import org.notchwork.problem.Attachments;
 import org.notchwork.study.Study;
 import org.notchwork.study.StudyReader;
 import org.notchwork.study.StudyReading;
@@ -18,7 +20,7 @@ final class StudyFileReader {
 
     /** Returns the study in a file. */
     static Study read(Path file) throws Refusal {
-        StudyReading reading = StudyReader.read(bytes(file));
+        StudyReading reading = StudyReader.read(bytes(file), name -> beside(file, name));
         if (reading.study().isPresent()) {
             return reading.study().get();
         }
@@ -26,6 +28,18 @@ final class StudyFileReader {
                 .map(f -> Printable.escape(file + ": " + f.line()))
                 .toList();
         throw new Refusal(Exit.USAGE, lines);
+    }
+
+    /** Returns a file that the study names, which stands beside it. */
+    private static Optional<byte[]> beside(Path study, String name) {
+        Path file = study.resolveSibling(name);
+        try {
+            return Files.isRegularFile(file) && Files.size(file) <= Attachments.MOST_BYTES
+                    ? Optional.of(Files.readAllBytes(file))
+                    : Optional.empty();
+        } catch (IOException e) {
+            return Optional.empty();
+        }
     }
 
     private static byte[] bytes(Path file) throws Refusal {

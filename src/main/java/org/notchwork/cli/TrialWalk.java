@@ -7,7 +7,9 @@ import java.util.List;
 import java.util.Map;
 import org.notchwork.bits.EchelonBasis;
 import org.notchwork.bits.Word;
+import org.notchwork.json.Printable;
 import org.notchwork.problem.Answer;
+import org.notchwork.problem.AnswerText;
 import org.notchwork.problem.BitFunction;
 import org.notchwork.problem.Certificate;
 import org.notchwork.problem.Instance;
@@ -19,6 +21,7 @@ import org.notchwork.seed.SeedTree;
 import org.notchwork.strategy.ClassicalStrategy;
 import org.notchwork.study.Experiment;
 import org.notchwork.study.StrategyChoice;
+import org.notchwork.trial.Outcome;
 import org.notchwork.trial.TrialRecord;
 
 /** Walks one recorded trial step by step, as a referee would do it by hand. */
@@ -51,7 +54,8 @@ final class TrialWalk {
         out.println("the instance, drawn again from the seed, hides " + text(instance.hidden()) + "; recorded: "
                 + text(trial.hidden()) + same(instance.hidden().equals(trial.hidden())));
         out.println();
-        if (choice.strategy() instanceof ClassicalStrategy classical) {
+        boolean isListed = instance.parts().isEmpty() && width < Long.SIZE;
+        if (choice.strategy() instanceof ClassicalStrategy classical && isListed) {
             queries(classical, experiment, choice, trial, function);
         }
         trial.certificate().ifPresent(c -> certificate(c, function));
@@ -60,7 +64,10 @@ final class TrialWalk {
                 .ifPresentOrElse(
                         a -> out.println(
                                 "answer: " + text(a) + same(a.equals(instance.hidden())) + " as what is hidden"),
-                        () -> out.println("no answer: the query limit of " + experiment.queryLimit() + " was reached"));
+                        () -> out.println(
+                                trial.outcome() == Outcome.CENSORED
+                                        ? "no answer: the query limit of " + experiment.queryLimit() + " was reached"
+                                        : "no answer: the strategy had done all that it does"));
         out.println("calls recorded: " + trial.counts().classical() + " classical, "
                 + trial.counts().quantum() + " quantum, " + trial.counts().inverse() + " inverse, "
                 + trial.counts().confirming() + " confirming");
@@ -75,7 +82,7 @@ final class TrialWalk {
         Recorder recorder = new Recorder(function);
         Meter meter = new Meter(experiment.queryLimit());
         strategy.attempt(
-                new Oracle(recorder, meter),
+                new Oracle(recorder, experiment.problem().promise(), meter),
                 seeds.stream(Address.strategy(experiment.id(), function.width(), trial.trial(), choice.label())));
         out.println("queries, asked again now:");
         Map<Long, Integer> seen = new HashMap<>();
@@ -103,37 +110,56 @@ final class TrialWalk {
             pair(collision.pair(), function);
         } else if (certificate instanceof Certificate.Equations equations) {
             out.println("certificate: independent words y, each with y·s = 0; eliminated one by one:");
-            eliminate(equations, function.width());
+            eliminate(equations.words(), 1, function.width());
             out.println("confirmation by two classical queries:");
             pair(equations.confirmation(), function);
+        } else if (certificate instanceof Certificate.Collisions collisions) {
+            out.println("certificate: collisions whose sums span the subspace");
+            collisions.pairs().forEach(p -> pair(p, function));
+        } else if (certificate instanceof Certificate.Annihilators annihilators) {
+            out.println("certificate: independent words orthogonal to the subspace; eliminated one by one:");
+            eliminate(annihilators.words(), annihilators.confirmations().size(), function.width());
+            out.println("confirmation of each word of a basis by classical queries:");
+            annihilators.confirmations().forEach(p -> pair(p, function));
+        } else if (certificate instanceof Certificate.Spanning spanning) {
+            out.println("certificate: measured words that span everything; eliminated one by one:");
+            eliminate(spanning.words(), 0, function.width());
+        } else if (certificate instanceof Certificate.Difference difference) {
+            out.println("certificate: two points with different values");
+            pair(difference.pair(), function);
+        } else if (certificate instanceof Certificate.Absent absent) {
+            out.println("no certificate that evaluations could check; the answer rests on "
+                    + Printable.escape(absent.basis()));
         }
     }
 
-    private void eliminate(Certificate.Equations equations, int width) {
+    private void eliminate(List<Word> words, int wanted, int width) {
         EchelonBasis basis = new EchelonBasis(width);
-        for (Word word : equations.words()) {
+        for (Word word : words) {
             long rest = basis.reduce(word.bits());
             boolean independent = basis.add(word.bits());
             out.println("  y = " + word.hex() + "  " + binary(width, word.bits()) + "  reduced " + binary(width, rest)
                     + "  rank " + basis.rank() + (independent ? "" : "  DEPENDENT"));
         }
         long[] solutions = basis.complement();
-        if (solutions.length != 1) {
+        if (solutions.length != wanted) {
             out.println("  the words leave " + solutions.length + " dimensions open, so they do not fix the answer");
+            return;
+        }
+        if (solutions.length != 1) {
+            out.println("  the words leave " + solutions.length + " dimensions, as they should");
             return;
         }
         Word solution = Word.of(width, solutions[0]);
         out.println("  the only word orthogonal to all of them, 0 apart: s = " + solution.hex() + "  "
                 + binary(width, solutions[0]));
-        long orthogonal =
-                equations.words().stream().filter(w -> w.dot(solution) == 0).count();
-        out.println(
-                "  y·s = 0 holds for " + orthogonal + " of " + equations.words().size());
+        long orthogonal = words.stream().filter(w -> w.dot(solution) == 0).count();
+        out.println("  y·s = 0 holds for " + orthogonal + " of " + words.size());
     }
 
     private void pair(Pair pair, BitFunction function) {
-        Word nowX = Word.of(function.valueWidth(), function.at(pair.x().bits()));
-        Word nowY = Word.of(function.valueWidth(), function.at(pair.y().bits()));
+        Word nowX = function.at(pair.x());
+        Word nowY = function.at(pair.y());
         out.println("  f(" + pair.x().hex() + ") = " + nowX.hex() + ", recorded "
                 + pair.fx().hex() + same(nowX.equals(pair.fx())));
         out.println("  f(" + pair.y().hex() + ") = " + nowY.hex() + ", recorded "
@@ -143,10 +169,7 @@ final class TrialWalk {
     }
 
     private static String text(Answer answer) {
-        if (answer instanceof Answer.Period period) {
-            return "s = " + period.s().hex();
-        }
-        return answer.toString();
+        return (answer instanceof Answer.Period ? "s = " : "") + AnswerText.of(answer);
     }
 
     private static String same(boolean equal) {

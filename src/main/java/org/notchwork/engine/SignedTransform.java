@@ -15,7 +15,8 @@ public final class SignedTransform {
      */
     public static long[] weights(Unitary unitary) {
         if (unitary.valueWidth() != 1) {
-            throw new IllegalArgumentException("the phase circuit wants values of one bit, not " + unitary.valueWidth());
+            throw new IllegalArgumentException(
+                    "the phase circuit wants values of one bit, not " + unitary.valueWidth());
         }
         long[] amplitudes = new long[1 << unitary.width()];
         for (int x = 0; x < amplitudes.length; x++) {

@@ -1,6 +1,7 @@
 package org.notchwork.figure;
 
 import java.math.BigDecimal;
+import java.math.RoundingMode;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
@@ -145,7 +146,12 @@ final class CellTally {
         }
         BigDecimal chance = GuessRate.of(problem.promise(), cell.width());
         return Optional.of(new ControlFigures(
-                controls, named, claimed, failed, chance, BinomialTail.atLeast(named, controls, chance)));
+                controls, named, claimed, failed, chance, rounded(BinomialTail.atLeast(named, controls, chance))));
+    }
+
+    /** The flag depends on what is written, so that it can be found again from the file. */
+    private static BigDecimal rounded(BigDecimal p) {
+        return p.setScale(Decimals.PLACES, RoundingMode.HALF_EVEN);
     }
 
     private QueryFigures queryFigures() {

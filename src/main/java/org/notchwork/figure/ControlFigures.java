@@ -12,8 +12,7 @@ import java.math.BigDecimal;
  * @param chance the rate at which a guess names what the trial hides
  * @param p the probability that guesses would name it so often or more often
  */
-public record ControlFigures(
-        long trials, long named, long claimed, long failed, BigDecimal chance, BigDecimal p) {
+public record ControlFigures(long trials, long named, long claimed, long failed, BigDecimal chance, BigDecimal p) {
 
     private static final BigDecimal LIMIT = new BigDecimal("0.001");
 

@@ -47,7 +47,9 @@ public sealed interface Answer {
             for (int i = 0; i < basis.size(); i++) {
                 boolean set = lead >= 0 && basis.get(i).value().testBit(lead);
                 boolean later = i > row && basis.get(i).value().bitLength() > lead;
-                if (set != (i == row) || later || basis.get(i).width() != basis.get(0).width()) {
+                if (set != (i == row)
+                        || later
+                        || basis.get(i).width() != basis.get(0).width()) {
                     throw new IllegalArgumentException("not a reduced echelon form: " + basis);
                 }
             }

@@ -6,6 +6,9 @@ import java.util.Optional;
 @FunctionalInterface
 public interface Attachments {
 
+    /** The largest file: 16 MiB. */
+    int MOST_BYTES = 16 << 20;
+
     /** No files at all. */
     Attachments NONE = name -> Optional.empty();
 

@@ -12,10 +12,8 @@ import java.util.List;
  */
 public final class Meter {
 
-    private static final CallKind[] KINDS = CallKind.values();
-
     private final long limit;
-    private final long[][] counts;
+    private final List<Counter> counters = new ArrayList<>();
     private long total;
 
     /** Creates a meter for one function that allows {@code limit} calls of all kinds together. */
@@ -34,7 +32,9 @@ public final class Meter {
             throw new IllegalArgumentException("a limit of " + limit + " calls of " + functions + " functions");
         }
         this.limit = limit;
-        this.counts = new long[functions][KINDS.length];
+        for (int function = 0; function < functions; function++) {
+            counters.add(new Counter());
+        }
     }
 
     /** Returns how many more calls are allowed. */
@@ -44,12 +44,12 @@ public final class Meter {
 
     /** Returns how many functions have a counter. */
     int functions() {
-        return counts.length;
+        return counters.size();
     }
 
     /** Counts one call of every function: what one value of a function made of all of them costs. */
     void count(CallKind kind) {
-        for (int function = 0; function < counts.length; function++) {
+        for (int function = 0; function < counters.size(); function++) {
             count(kind, function);
         }
     }
@@ -59,7 +59,7 @@ public final class Meter {
         if (remaining() == 0) {
             throw new IllegalStateException("a call beyond the limit of " + limit);
         }
-        counts[function][kind.ordinal()]++;
+        counters.get(function).count(kind);
         total++;
     }
 
@@ -70,14 +70,28 @@ public final class Meter {
 
     /** Returns the counts so far, one a function. */
     public List<Counts> byFunction() {
-        List<Counts> list = new ArrayList<>();
-        for (long[] one : counts) {
-            list.add(new Counts(
-                    one[CallKind.CLASSICAL.ordinal()],
-                    one[CallKind.QUANTUM.ordinal()],
-                    one[CallKind.INVERSE.ordinal()],
-                    one[CallKind.CONFIRMING.ordinal()]));
+        return counters.stream().map(Counter::counts).toList();
+    }
+
+    /** The counts of one function. */
+    private static final class Counter {
+
+        private long classical;
+        private long quantum;
+        private long inverse;
+        private long confirming;
+
+        void count(CallKind kind) {
+            switch (kind) {
+                case CLASSICAL -> classical++;
+                case QUANTUM -> quantum++;
+                case INVERSE -> inverse++;
+                case CONFIRMING -> confirming++;
+            }
         }
-        return list;
+
+        Counts counts() {
+            return new Counts(classical, quantum, inverse, confirming);
+        }
     }
 }

@@ -13,7 +13,6 @@ import org.knowm.xchart.XYChart;
 import org.knowm.xchart.XYSeries;
 import org.knowm.xchart.style.XYStyler;
 import org.knowm.xchart.style.markers.SeriesMarkers;
-import org.notchwork.catalogue.Laws;
 import org.notchwork.figure.CellFigures;
 import org.notchwork.figure.Interval;
 import org.notchwork.law.QueryLaw;
@@ -88,7 +87,7 @@ final class QueryChart {
     }
 
     private Optional<QueryLaw> law(StrategyChoice choice) {
-        return Laws.law(experiment.problem().kind(), choice.strategy().name());
+        return choice.law(experiment.problem());
     }
 
     private static double shift(int series, int all) {

@@ -18,16 +18,16 @@ import org.notchwork.check.InstanceTally;
 import org.notchwork.check.LineChecks;
 import org.notchwork.claim.Judge;
 import org.notchwork.figure.Summary;
-import org.notchwork.json.CanonicalJson;
 import org.notchwork.figure.SummaryBuilder;
+import org.notchwork.json.CanonicalJson;
 import org.notchwork.problem.Instance;
 import org.notchwork.report.Report;
 import org.notchwork.study.Experiment;
 import org.notchwork.study.Study;
+import org.notchwork.trial.ControlRecord;
 import org.notchwork.trial.TrialGroup;
 import org.notchwork.trial.TrialPool;
 import org.notchwork.trial.TrialRange;
-import org.notchwork.trial.ControlRecord;
 import org.notchwork.trial.TrialRunner;
 
 /** Runs a study from its first trial to its sealed bundle. */
@@ -114,7 +114,10 @@ public final class StudyRun {
         TrialGroup group = runner.run(experiment, width, trial);
         List<Line> lines = new ArrayList<>();
         for (int i = 0; i < group.records().size(); i++) {
-            lines.add(new Line(group.records().get(i), experiment.strategies().get(i), experiment.problem().functions()));
+            lines.add(new Line(
+                    group.records().get(i),
+                    experiment.strategies().get(i),
+                    experiment.problem().functions()));
         }
         InstanceTally examined = InstanceTally.NONE;
         if (CrossChecker.isExhaustive(study, width)) {

@@ -5,10 +5,12 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import org.notchwork.catalogue.Engines;
-import org.notchwork.catalogue.Laws;
+import org.notchwork.engine.Circuit;
 import org.notchwork.engine.Engine;
 import org.notchwork.exact.Decimals;
 import org.notchwork.problem.Problem;
+import org.notchwork.problem.Question;
+import org.notchwork.strategy.QuantumStrategy;
 
 /**
  * What a study will probably cost, from the laws of its strategies and a plain model of the work.
@@ -31,6 +33,10 @@ public final class Forecast {
     /** Nanoseconds of one comparison while sorting a domain. */
     private static final double SORT = 4;
 
+    /** How many times as long a gate takes on complex amplitudes of 16 bytes as on real ones of 4. */
+    private static final double COMPLEX = 4;
+    /** Nanoseconds of a tableau of all gates of a circuit, over the cube of the width. */
+    private static final double TABLEAU = 1;
     /** Nanoseconds of writing and hashing the line of a trial. */
     private static final double LINE = 15_000;
 
@@ -64,8 +70,8 @@ public final class Forecast {
         boolean quantum =
                 experiment.strategies().stream().anyMatch(s -> s.engine().isPresent());
         if (quantum && (width <= ENGINES_WIDTH || trial < FIRST_INSTANCES)) {
-            for (Engine engine : Engines.all()) {
-                nanos += preparing(engine, width) + Math.scalb(2.0, 2 * width);
+            for (Engine engine : Engines.reference()) {
+                nanos += preparing(engine, width, Circuit.FOURIER) + Math.scalb(2.0, 2 * width);
             }
         }
         return nanos;
@@ -86,12 +92,13 @@ public final class Forecast {
 
     private static CellForecast cell(Experiment experiment, int width, StrategyChoice choice) {
         Problem problem = experiment.problem();
-        Optional<BigDecimal> mean = Laws.law(problem.kind(), choice.strategy().name())
-                .map(law -> law.mean(width).value());
+        Optional<BigDecimal> mean =
+                choice.law(problem).map(law -> law.mean(width).value());
         BigDecimal limit = BigDecimal.valueOf(experiment.queryLimit());
-        BigDecimal queries = mean.map(m -> m.min(limit)).orElse(limit);
-        double perQuery = choice.engine().isPresent() ? sampling(choice.engine().get(), width) : QUERY;
-        double preparing = choice.engine().map(e -> preparing(e, width)).orElse(0.0);
+        BigDecimal queries = mean.orElseGet(() -> guess(problem, width)).min(limit);
+        double perQuery = choice.engine().isPresent() ? sampling(choice.engine().get(), width, circuit(choice)) : QUERY;
+        double preparing =
+                choice.engine().map(e -> preparing(e, width, circuit(choice))).orElse(0.0);
         double share = drawing(problem, width) / experiment.strategies().size();
         long memory = problem.memoryBytes(width)
                 + choice.engine().map(e -> e.memoryBytes(width)).orElse(0L)
@@ -125,15 +132,41 @@ public final class Forecast {
         return problem.memoryBytes(width) > 1 << 10 ? DRAW * Math.scalb(1.0, width) : 2000;
     }
 
-    private static double preparing(Engine engine, int width) {
+    private static Circuit circuit(StrategyChoice choice) {
+        return choice.strategy() instanceof QuantumStrategy quantum ? quantum.circuit() : Circuit.FOURIER;
+    }
+
+    /** Where no law is known: four times the square root of the number of words, and n at least. */
+    private static BigDecimal guess(Problem problem, int width) {
+        double root = problem.promise().question() == Question.CONSTANT_OR_BALANCED ? 2 : Math.scalb(4.0, width / 2);
+        return BigDecimal.valueOf(Math.max(width, root));
+    }
+
+    /** Nanoseconds before the first sample. */
+    private static double preparing(Engine engine, int width, Circuit circuit) {
+        int qubits = circuit == Circuit.PHASE ? width + 1 : 2 * width;
         return switch (engine.name()) {
-            case "statevector" -> (2 * width + 2) * AMPLITUDE * Math.scalb(1.0, 2 * width);
-            case "fibre" -> SORT * width * Math.scalb(1.0, width);
+            case "statevector" -> circuit == Circuit.AMPLIFIED ? 0 : gates(width) * Math.scalb(1.0, qubits);
+            case "fibre", "weights" -> SORT * width * Math.scalb(1.0, width);
+            case "stabilizer" -> TABLEAU * width * width * width;
             default -> 0;
         };
     }
 
-    private static double sampling(Engine engine, int width) {
-        return engine.name().equals("annihilator") ? 100.0 : 300.0 + 20.0 * width;
+    private static double gates(int width) {
+        return (2 * width + 2) * AMPLITUDE;
+    }
+
+    /** Nanoseconds of one sample, by the calls that it counts. */
+    private static double sampling(Engine engine, int width, Circuit circuit) {
+        return switch (engine.name()) {
+            case "annihilator" -> 100.0;
+            case "stabilizer" -> 300.0 + width * (double) width;
+            case "statevector" ->
+                circuit == Circuit.AMPLIFIED
+                        ? COMPLEX * gates(width) * Math.scalb(1.0, 2 * width)
+                        : 300.0 + 20.0 * width;
+            default -> 300.0 + 20.0 * width + (circuit == Circuit.AMPLIFIED ? Math.scalb(1.0, width) : 0);
+        };
     }
 }

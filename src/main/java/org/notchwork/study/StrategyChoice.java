@@ -55,7 +55,8 @@ public record StrategyChoice(
      * strategy ({@code @auto} where the engine was not named).
      */
     public String label() {
-        return ownLabel.orElseGet(() -> engine.map(e -> strategy.name() + "@" + (asked == Asked.BY_NAME ? e.name() : "auto"))
+        return ownLabel.orElseGet(() -> engine.map(
+                        e -> strategy.name() + "@" + (asked == Asked.BY_NAME ? e.name() : "auto"))
                 .orElse(strategy.name()));
     }
 

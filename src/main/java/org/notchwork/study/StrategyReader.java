@@ -56,8 +56,8 @@ final class StrategyReader {
             return Optional.empty();
         }
         if (!auto) {
-            return Optional.of(new StrategyChoice(
-                    strategy.get(), engine, StrategyChoice.Asked.BY_NAME, label, noise, control));
+            return Optional.of(
+                    new StrategyChoice(strategy.get(), engine, StrategyChoice.Asked.BY_NAME, label, noise, control));
         }
         return engines.strongest(fields, (QuantumStrategy) strategy.get(), allowsSighted)
                 .map(chosen -> new StrategyChoice(
@@ -80,15 +80,19 @@ final class StrategyReader {
         fields.end();
         if (flip.compareTo(HALF) == 0) {
             fields.fault(
-                    "readout-flip", "a bit that is flipped with probability 1/2 holds no information", "less is wanted");
+                    "readout-flip",
+                    "a bit that is flipped with probability 1/2 holds no information",
+                    "less is wanted");
             return Noise.NONE;
         }
         if (flip.compareTo(HALF) > 0) {
-            fields.fault("readout-flip", "p = " + flip + " is above 1/2", "1 - p with every bit inverted says the same");
+            fields.fault(
+                    "readout-flip", "p = " + flip + " is above 1/2", "1 - p with every bit inverted says the same");
             return Noise.NONE;
         }
         if (mix.compareTo(BigDecimal.ONE) >= 0) {
-            fields.fault("uniform-mix", "q = " + mix + ": a uniform word holds no information", "less than 1 is wanted");
+            fields.fault(
+                    "uniform-mix", "q = " + mix + ": a uniform word holds no information", "less than 1 is wanted");
             return Noise.NONE;
         }
         return new Noise(flip, mix);
@@ -113,12 +117,10 @@ final class StrategyReader {
         if (name.isEmpty()) {
             return Optional.empty();
         }
-        return Strategies.form(name)
-                .map(form -> form.configure(fields, noise))
-                .or(() -> {
-                    fields.fault("name", "no strategy " + Fields.quoted(name), Spelling.mend(name, Strategies.names()));
-                    return Optional.empty();
-                });
+        return Strategies.form(name).map(form -> form.configure(fields, noise)).or(() -> {
+            fields.fault("name", "no strategy " + Fields.quoted(name), Spelling.mend(name, Strategies.names()));
+            return Optional.empty();
+        });
     }
 
     /** Returns the engine; one that an unknown strategy names is checked for itself. */
@@ -131,8 +133,8 @@ final class StrategyReader {
         }
         if (strategy.isPresent() && !classical && !fields.has("engine")) {
             String engines = String.join(", ", Engines.names());
-            String mend = strategy.get().name() + " is a quantum strategy; " + AUTO + " or one of " + engines
-                    + " is wanted";
+            String mend =
+                    strategy.get().name() + " is a quantum strategy; " + AUTO + " or one of " + engines + " is wanted";
             fields.fault("engine", "this member is missing", mend);
             return Optional.empty();
         }

@@ -74,9 +74,8 @@ public final class StudyJson {
     }
 
     private static JsonObject choice(StrategyChoice choice) {
-        JsonObject.Builder json = JsonObject.builder()
-                .put("name", choice.strategy().name())
-                .put("label", choice.ownLabel());
+        JsonObject.Builder json =
+                JsonObject.builder().put("name", choice.strategy().name()).put("label", choice.ownLabel());
         choice.strategy().settings().members().forEach(json::put);
         if (choice.asked() == StrategyChoice.Asked.BY_NAME) {
             json.put("engine", choice.engine().map(e -> e.name()));

@@ -25,7 +25,6 @@ public final class StudyReader {
     /** The second version: controls at small widths, distributions and rates checked against their laws. */
     public static final String SECOND_FORMAT = "notchwork-study/2";
 
-
     /** The largest width that can be checked exhaustively. */
     public static final int GREATEST_CROSS_CHECK = 12;
 
@@ -34,8 +33,7 @@ public final class StudyReader {
     private static final int LONGEST_TEXT = 2000;
     private static final int MOST_EXPERIMENTS = 8;
     private static final int MOST_CLAIMS = 100;
-    private static final Pattern FORMATS =
-            Pattern.compile(Pattern.quote(FORMAT) + "|" + Pattern.quote(SECOND_FORMAT));
+    private static final Pattern FORMATS = Pattern.compile(Pattern.quote(FORMAT) + "|" + Pattern.quote(SECOND_FORMAT));
 
     private StudyReader() {}
 

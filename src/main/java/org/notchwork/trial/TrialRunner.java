@@ -23,8 +23,8 @@ import org.notchwork.strategy.ClassicalStrategy;
 import org.notchwork.strategy.QuantumStrategy;
 import org.notchwork.study.Cell;
 import org.notchwork.study.Experiment;
-import org.notchwork.study.Study;
 import org.notchwork.study.StrategyChoice;
+import org.notchwork.study.Study;
 
 /** Runs single trials. Immutable; what it returns depends on the study alone. */
 public final class TrialRunner {
@@ -132,8 +132,7 @@ public final class TrialRunner {
     }
 
     /** Returns what an answer in a control amounts to. */
-    public static ControlOutcome outcome(
-            Instance instance, Answer answer, Certificate certificate, Answer secret) {
+    public static ControlOutcome outcome(Instance instance, Answer answer, Certificate certificate, Answer secret) {
         if (answer instanceof Answer.NoPeriod) {
             return ControlOutcome.NOTHING;
         }
@@ -152,8 +151,7 @@ public final class TrialRunner {
             Answer told,
             Meter meter,
             RandomStream stream) {
-        Oracle oracle =
-                new Oracle(instance.function(), experiment.problem().promise(), meter, instance.parts());
+        Oracle oracle = new Oracle(instance.function(), experiment.problem().promise(), meter, instance.parts());
         if (choice.strategy() instanceof ClassicalStrategy classical) {
             return classical.attempt(oracle, stream);
         }

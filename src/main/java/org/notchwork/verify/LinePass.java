@@ -81,6 +81,9 @@ final class LinePass {
             }
             digests.put(Layout.trials(experiment.id()), Digests.text(digest.digest()));
         }
+        Optional<Misplacement> inControls =
+                new ControlPass(study, bag, lineLimit, certificates, figures, misplaced).run(digests);
+        misplacement = misplacement.or(() -> inControls);
     }
 
     /** Reads the lines that the study calls for; returns false after the first that is another or is missing. */

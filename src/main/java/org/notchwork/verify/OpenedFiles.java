@@ -20,6 +20,7 @@ import org.notchwork.json.JsonFault;
 import org.notchwork.json.JsonLimits;
 import org.notchwork.json.JsonReader;
 import org.notchwork.json.JsonValue;
+import org.notchwork.problem.Attachments;
 import org.notchwork.study.Study;
 import org.notchwork.study.StudyJson;
 import org.notchwork.study.StudyReader;
@@ -60,7 +61,7 @@ record OpenedFiles(Study study, Seal seal, List<CrossCheck> checks, Map<String, 
         for (String name : NAMES) {
             values.put(name, canonical(bag, name));
         }
-        Study study = study(values.get(Layout.STUDY));
+        Study study = study(values.get(Layout.STUDY), bag);
         requireLayout(bag, study);
         List<Fault> faults = new ArrayList<>();
         Seal seal = Seal.read(values.get(Layout.SEAL), Layout.sealed(study), faults);
@@ -86,8 +87,8 @@ record OpenedFiles(Study study, Seal seal, List<CrossCheck> checks, Map<String, 
         }
     }
 
-    private static Study study(JsonValue value) throws Malformed {
-        StudyReading reading = StudyReader.read(value);
+    private static Study study(JsonValue value, Bag bag) throws Malformed {
+        StudyReading reading = StudyReader.read(value, name -> attachment(bag, name));
         refuse(Layout.STUDY, reading.faults());
         Study study = reading.study().orElseThrow();
         if (!StudyJson.write(study).equals(value)) {
@@ -95,6 +96,19 @@ record OpenedFiles(Study study, Seal seal, List<CrossCheck> checks, Map<String, 
                     Layout.DATA + Layout.STUDY + ": defaults are left out; a bundle's study states them all");
         }
         return study;
+    }
+
+    /** A study can name any file; what it names is looked for among the bundle's tables alone. */
+    private static Optional<byte[]> attachment(Bag bag, String name) {
+        String path = Layout.DATA + Layout.attachment(name);
+        if (!bag.sizes().containsKey(path)) {
+            return Optional.empty();
+        }
+        try {
+            return Optional.of(bag.read(path, Attachments.MOST_BYTES));
+        } catch (IOException | BundleFault e) {
+            return Optional.empty();
+        }
     }
 
     private static void requireLayout(Bag bag, Study study) throws Malformed {

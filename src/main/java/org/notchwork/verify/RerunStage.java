@@ -5,7 +5,9 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import org.notchwork.bundle.Bag;
+import org.notchwork.bundle.ControlLine;
 import org.notchwork.bundle.Layout;
+import org.notchwork.bundle.TrialLine;
 import org.notchwork.catalogue.Engines;
 import org.notchwork.check.CrossCheck;
 import org.notchwork.check.CrossChecker;
@@ -15,6 +17,7 @@ import org.notchwork.check.LineChecks;
 import org.notchwork.figure.SummaryBuilder;
 import org.notchwork.study.Experiment;
 import org.notchwork.study.Study;
+import org.notchwork.trial.ControlRecord;
 import org.notchwork.trial.TrialGroup;
 import org.notchwork.trial.TrialPool;
 import org.notchwork.trial.TrialRange;
@@ -74,16 +77,27 @@ final class RerunStage {
         List<TrialRange> ranges = TrialRange.of(files.study()).stream()
                 .filter(r -> r.experiment().equals(experiment))
                 .toList();
-        try (WrittenLines written = new WrittenLines(bag, path, options.limits().lineBytes(), findings)) {
+        boolean controlled = files.study().hasControls(experiment);
+        String controlPath = controlled ? Layout.DATA + Layout.controls(experiment.id()) : path;
+        long[] controls = {0};
+        try (WrittenLines written = new WrittenLines(bag, path, options.limits().lineBytes(), findings);
+                WrittenLines writtenControls =
+                        new WrittenLines(bag, controlPath, options.limits().lineBytes(), findings)) {
             new TrialPool(options.threads()).<Again, WrittenLines.Stopped>run(ranges, this::again, (Again again) -> {
                 TrialGroup group = again.group();
                 long first = Lines.first(experiment, group.width(), group.trial());
                 for (int i = 0; i < group.records().size(); i++) {
                     written.compare(
                             first + i,
-                            group.records().get(i),
-                            experiment.strategies().get(i));
+                            TrialLine.write(
+                                    group.records().get(i),
+                                    experiment.strategies().get(i),
+                                    experiment.problem().functions()));
                     compared++;
+                }
+                for (ControlRecord control : group.controls()) {
+                    writtenControls.compare(controls[0]++, ControlLine.write(control));
+                    figures.addControl(control);
                 }
                 figures.add(group);
                 lineChecks.add(group);

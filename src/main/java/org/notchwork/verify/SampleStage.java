@@ -7,6 +7,7 @@ import java.util.NavigableSet;
 import java.util.TreeSet;
 import org.notchwork.bundle.Bag;
 import org.notchwork.bundle.Layout;
+import org.notchwork.bundle.TrialLine;
 import org.notchwork.catalogue.Engines;
 import org.notchwork.check.CheckOutcome;
 import org.notchwork.check.Comparison;
@@ -140,7 +141,9 @@ final class SampleStage {
         long first = Lines.first(experiment, group.width(), group.trial());
         for (TrialRecord record : group.records()) {
             StrategyChoice choice = experiment.choice(record.cell().label()).orElseThrow();
-            written.compare(first + experiment.strategies().indexOf(choice), record, choice);
+            written.compare(
+                    first + experiment.strategies().indexOf(choice),
+                    TrialLine.write(record, choice, experiment.problem().functions()));
             compared++;
             listener.read();
         }

@@ -9,7 +9,6 @@ import org.notchwork.bundle.Bag;
 import org.notchwork.bundle.BundleFault;
 import org.notchwork.bundle.Layout;
 import org.notchwork.check.CheckOutcome;
-import org.notchwork.seed.SeedTree;
 import org.notchwork.study.Study;
 import org.notchwork.trial.TrialRunner;
 
@@ -83,7 +82,7 @@ public final class Verifier {
 
     private Verdict opened(Bag bag) throws IOException, BundleFault, OpenedFiles.Malformed, InterruptedException {
         OpenedFiles files = OpenedFiles.open(bag);
-        TrialRunner runner = new TrialRunner(new SeedTree(files.study().seed()));
+        TrialRunner runner = new TrialRunner(files.study());
         LinePass pass = new LinePass(files.study(), bag, options.limits().lineBytes(), runner);
         long instances =
                 files.study().experiments().stream().mapToLong(Lines::instances).sum();

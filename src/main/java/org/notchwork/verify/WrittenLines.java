@@ -7,13 +7,11 @@ import java.util.OptionalLong;
 import org.notchwork.bundle.Bag;
 import org.notchwork.bundle.BundleFault;
 import org.notchwork.bundle.LineReader;
-import org.notchwork.bundle.TrialLine;
 import org.notchwork.json.CanonicalJson;
 import org.notchwork.json.JsonFault;
 import org.notchwork.json.JsonLimits;
+import org.notchwork.json.JsonObject;
 import org.notchwork.json.JsonReader;
-import org.notchwork.study.StrategyChoice;
-import org.notchwork.trial.TrialRecord;
 
 /** The lines of one file as they are written, walked forward and compared with trials that were run again. */
 final class WrittenLines implements AutoCloseable {
@@ -47,11 +45,10 @@ final class WrittenLines implements AutoCloseable {
      * Compares a line, to the byte, with the trial that was run again; a difference is noted field by field.
      *
      * @param index the line's place in the file, from 0; never before the last one asked for
-     * @param again what the trial came to
-     * @param choice the strategy and engine that ran it
+     * @param again the line that the trial came to
      */
-    void compare(long index, TrialRecord again, StrategyChoice choice) throws Stopped {
-        byte[] right = CanonicalJson.bytes(TrialLine.write(again, choice));
+    void compare(long index, JsonObject again) throws Stopped {
+        byte[] right = CanonicalJson.bytes(again);
         byte[] written = at(index).orElseGet(() -> new byte[0]);
         if (!Arrays.equals(written, right)) {
             difference(written, right);

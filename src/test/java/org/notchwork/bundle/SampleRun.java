@@ -16,7 +16,6 @@ import org.notchwork.claim.Judge;
 import org.notchwork.figure.Summary;
 import org.notchwork.figure.SummaryBuilder;
 import org.notchwork.json.CanonicalJson;
-import org.notchwork.seed.SeedTree;
 import org.notchwork.study.Experiment;
 import org.notchwork.study.Study;
 import org.notchwork.study.StudyReader;
@@ -85,7 +84,7 @@ final class SampleRun {
 
     SampleRun() {
         study = StudyReader.read(STUDY.getBytes(StandardCharsets.UTF_8)).study().orElseThrow();
-        TrialRunner runner = new TrialRunner(new SeedTree(study.seed()));
+        TrialRunner runner = new TrialRunner(study);
         SummaryBuilder figures = new SummaryBuilder(study);
         LineChecks lines = new LineChecks(study);
         InstanceExaminer examiner = new InstanceExaminer(Engines.all());

@@ -69,7 +69,7 @@ class SchemasTest {
     /** Faults that a schema can express: schema and reader both refuse. */
     @ParameterizedTest
     @CsvSource(delimiter = '|', quoteCharacter = '~', textBlock = """
-            notchwork-study/1                                | notchwork-study/2
+            notchwork-study/1                                | notchwork-study/3
             "title": "A small study of an invented lock"     | "title": ""
             "seed": "a seed of the small study"              | "seed": "short"
             "cross-check-width": 5                           | "cross-check-width": 13

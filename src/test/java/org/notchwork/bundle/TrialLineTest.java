@@ -15,7 +15,6 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.notchwork.bits.Word;
 import org.notchwork.catalogue.Engines;
-import org.notchwork.catalogue.Strategies;
 import org.notchwork.json.CanonicalJson;
 import org.notchwork.json.Fault;
 import org.notchwork.json.JsonFault;
@@ -28,6 +27,7 @@ import org.notchwork.problem.Pair;
 import org.notchwork.strategy.Usage;
 import org.notchwork.study.Cell;
 import org.notchwork.study.StrategyChoice;
+import org.notchwork.support.Studies;
 import org.notchwork.trial.Outcome;
 import org.notchwork.trial.TrialRecord;
 
@@ -107,7 +107,7 @@ class TrialLineTest {
     @ParameterizedTest
     @CsvSource({
         "notchwork-trial/1, notchwork-trial/2, /format",
-        "'\"width\":5', '\"width\":64', /width",
+        "'\"width\":5', '\"width\":2049', /width",
         "'\"width\":5', '\"width\":\"5\"', /width",
         "'\"trial\":7', '\"trial\":-1', /trial",
         "'\"outcome\":\"solved\"', '\"outcome\":\"won\"', /outcome",
@@ -115,7 +115,7 @@ class TrialLineTest {
         "'\"hidden\":{\"period\":\"15\"}', '\"hidden\":{\"period\":\"20\"}', /hidden/period",
         "'\"hidden\":{\"period\":\"15\"}', '\"hidden\":{\"period\":\"5\"}', /hidden/period",
         "'\"hidden\":{\"period\":\"15\"}', '\"hidden\":{\"period\":\"1G\"}', /hidden/period",
-        "'\"hidden\":{\"period\":\"15\"}', '\"hidden\":{\"mask\":\"15\"}', /hidden/period",
+        "'\"hidden\":{\"period\":\"15\"}', '\"hidden\":{\"disguise\":\"15\"}', /hidden/period",
         "'\"quantum\":5', '\"quantum\":-5', /calls/quantum",
         "'\"quantum\":5', '\"quantum\":5,\"secret\":1', /calls/secret",
         "'\"equations\":5', '\"equations\":\"five\"', /equations",
@@ -186,10 +186,10 @@ class TrialLineTest {
     }
 
     private static StrategyChoice choice(String strategy) {
-        return new StrategyChoice(Strategies.strategy(strategy).orElseThrow(), Optional.empty());
+        return new StrategyChoice(Studies.strategy(strategy), Optional.empty());
     }
 
     private static StrategyChoice choice(String strategy, String engine) {
-        return new StrategyChoice(Strategies.strategy(strategy).orElseThrow(), Engines.engine(engine));
+        return new StrategyChoice(Studies.strategy(strategy), Engines.engine(engine));
     }
 }

@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.function.LongUnaryOperator;
 import org.junit.jupiter.api.Test;
 import org.notchwork.bits.Word;
+import org.notchwork.check.ExhaustiveSearch;
 import org.notchwork.problem.Answer;
 import org.notchwork.problem.BitFunction;
 import org.notchwork.problem.Certificate;

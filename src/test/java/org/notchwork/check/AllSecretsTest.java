@@ -18,6 +18,7 @@ import org.notchwork.strategy.Attempt;
 import org.notchwork.strategy.ClassicalStrategy;
 import org.notchwork.strategy.classical.SequentialScan;
 import org.notchwork.study.Experiment;
+import org.notchwork.study.StrategyChoice;
 import org.notchwork.support.Streams;
 import org.notchwork.support.Studies;
 
@@ -27,7 +28,13 @@ class AllSecretsTest {
             Studies.experiment(List.of(5), List.of(Studies.classical("sequential-scan")), 1, 100);
 
     private CrossCheck check(ClassicalStrategy strategy, int width) {
-        return new AllSecrets(Streams.tree()).check(experiment, width, "main/5/x", strategy, new SequentialScanLaw());
+        return new AllSecrets(Streams.tree())
+                .check(
+                        experiment,
+                        width,
+                        "main/5/x",
+                        new StrategyChoice(strategy, Optional.empty()),
+                        new SequentialScanLaw());
     }
 
     @ParameterizedTest

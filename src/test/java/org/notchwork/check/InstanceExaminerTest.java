@@ -10,6 +10,7 @@ import org.junit.jupiter.api.Test;
 import org.notchwork.bits.Word;
 import org.notchwork.catalogue.Engines;
 import org.notchwork.engine.BlindEngine;
+import org.notchwork.engine.Circuit;
 import org.notchwork.engine.Engine;
 import org.notchwork.engine.Outcomes;
 import org.notchwork.engine.Simulation;
@@ -33,7 +34,7 @@ class InstanceExaminerTest {
     private final Experiment experiment = Studies.experiment(List.of(WIDTH), Studies.allChoices(), 3, 100);
     private final Instance instance = Studies.runner().instance(experiment, WIDTH, 0);
     private final TrialGroup group = Studies.runner().run(experiment, WIDTH, 0);
-    private final InstanceExaminer examiner = new InstanceExaminer(Engines.all());
+    private final InstanceExaminer examiner = new InstanceExaminer(Engines.reference());
 
     @Test
     void anHonestInstanceAgreesInAllThatIsCompared() {
@@ -100,7 +101,7 @@ class InstanceExaminerTest {
         }
 
         @Override
-        public Optional<String> refusal(Problem problem, int width) {
+        public Optional<String> refusal(Problem problem, int width, Circuit circuit) {
             return Optional.empty();
         }
 

@@ -17,7 +17,6 @@ import org.notchwork.figure.QueryFigures;
 import org.notchwork.figure.SummaryBuilder;
 import org.notchwork.law.Prediction;
 import org.notchwork.law.QueryLaw;
-import org.notchwork.seed.SeedTree;
 import org.notchwork.study.Cell;
 import org.notchwork.study.Study;
 import org.notchwork.trial.TrialGroup;
@@ -55,7 +54,7 @@ class NothingToCompareTest {
     @Test
     void aClosedFormOfCensoredTrialsOnlySaysSo() {
         Study study = Studies.of(Studies.SMALL.replace("\"query-limit\": 9", "\"query-limit\": 1"));
-        TrialRunner runner = new TrialRunner(new SeedTree(study.seed()));
+        TrialRunner runner = new TrialRunner(study);
         LineChecks lines = new LineChecks(study);
         lines.add(runner.run(study.experiments().get(1), 6, 0));
         CrossCheck check = lines.check(new Cell("cut", 6, "sequential-scan")).orElseThrow();
@@ -86,7 +85,7 @@ class NothingToCompareTest {
     }
 
     private static SummaryBuilder summaryOfOneTrialEach(Study study) {
-        TrialRunner runner = new TrialRunner(new SeedTree(study.seed()));
+        TrialRunner runner = new TrialRunner(study);
         SummaryBuilder builder = new SummaryBuilder(study);
         study.experiments()
                 .forEach(e -> e.widths().forEach(w -> {

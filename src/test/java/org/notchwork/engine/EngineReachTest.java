@@ -31,12 +31,14 @@ class EngineReachTest {
         "fibre, 63, annihilator"
     })
     void aRefusalNamesAnEngineThatCan(String name, int width, String other) {
-        String refusal =
-                Engines.engine(name).orElseThrow().refusal(PROBLEM, width).orElseThrow();
+        String refusal = Engines.engine(name)
+                .orElseThrow()
+                .refusal(PROBLEM, width, Circuit.FOURIER)
+                .orElseThrow();
         assertTrue(refusal.contains("engine " + other), refusal);
         assertEquals(
                 0,
-                Engines.engine(other).orElseThrow().refusal(PROBLEM, width).stream()
+                Engines.engine(other).orElseThrow().refusal(PROBLEM, width, Circuit.FOURIER).stream()
                         .count());
     }
 

@@ -8,7 +8,6 @@ import java.util.Collections;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.notchwork.Studies;
-import org.notchwork.seed.SeedTree;
 import org.notchwork.study.Study;
 import org.notchwork.trial.TrialGroup;
 import org.notchwork.trial.TrialRecord;
@@ -18,7 +17,7 @@ import org.notchwork.trial.TrialRunner;
 class MisplacedGroupsTest {
 
     private final Study study = Studies.small();
-    private final TrialRunner runner = new TrialRunner(new SeedTree(study.seed()));
+    private final TrialRunner runner = new TrialRunner(study);
     private final TrialGroup group = runner.run(study.experiments().get(0), 5, 0);
 
     @Test

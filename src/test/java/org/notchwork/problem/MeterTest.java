@@ -13,7 +13,7 @@ class MeterTest {
     @Test
     void everyCallIsCountedByItsKind() {
         Meter meter = new Meter(100);
-        Oracle oracle = new Oracle(function, meter);
+        Oracle oracle = new Oracle(function, Promise.period(Promise.Labels.RANDOM), meter);
         Unitary unitary = new Unitary(function, meter);
         assertEquals(7, oracle.query(2));
         assertEquals(0, oracle.query(1));
@@ -32,7 +32,7 @@ class MeterTest {
     @Test
     void aCallBeyondTheLimitIsAFaultAndIsNotCounted() {
         Meter meter = new Meter(2);
-        Oracle oracle = new Oracle(function, meter);
+        Oracle oracle = new Oracle(function, Promise.period(Promise.Labels.RANDOM), meter);
         oracle.query(0);
         oracle.confirm(0);
         assertEquals(0, meter.remaining());
@@ -46,7 +46,7 @@ class MeterTest {
 
     @Test
     void oracleAndUnitaryShowTheWidthsOfTheFunction() {
-        Oracle oracle = new Oracle(function, new Meter(1));
+        Oracle oracle = new Oracle(function, Promise.period(Promise.Labels.RANDOM), new Meter(1));
         assertEquals(2, oracle.width());
         assertEquals(3, oracle.valueWidth());
         Unitary unitary = new Unitary(function, new Meter(1));

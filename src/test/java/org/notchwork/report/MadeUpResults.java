@@ -12,6 +12,7 @@ import org.notchwork.check.CheckKind;
 import org.notchwork.check.CheckOutcome;
 import org.notchwork.check.CrossCheck;
 import org.notchwork.claim.Judge;
+import org.notchwork.engine.Circuit;
 import org.notchwork.engine.Simulation;
 import org.notchwork.figure.CellFigures;
 import org.notchwork.figure.Interval;
@@ -166,6 +167,11 @@ final class MadeUpResults {
     }
 
     private record Quantum(String name) implements QuantumStrategy {
+
+        @Override
+        public Circuit circuit() {
+            return Circuit.FOURIER;
+        }
 
         @Override
         public Attempt attempt(Simulation simulation, Oracle oracle, RandomStream stream) {

@@ -13,7 +13,6 @@ import org.notchwork.check.LineChecks;
 import org.notchwork.claim.Judge;
 import org.notchwork.figure.Summary;
 import org.notchwork.figure.SummaryBuilder;
-import org.notchwork.seed.SeedTree;
 import org.notchwork.study.Claim;
 import org.notchwork.study.Experiment;
 import org.notchwork.study.StrategyChoice;
@@ -69,7 +68,7 @@ final class Samples {
     }
 
     static Results results(Study study) {
-        TrialRunner runner = new TrialRunner(new SeedTree(study.seed()));
+        TrialRunner runner = new TrialRunner(study);
         SummaryBuilder figures = new SummaryBuilder(study);
         LineChecks lines = new LineChecks(study);
         for (Experiment experiment : study.experiments()) {

@@ -13,6 +13,7 @@ import org.junit.jupiter.params.provider.MethodSource;
 import org.junit.jupiter.params.provider.ValueSource;
 import org.notchwork.problem.Meter;
 import org.notchwork.problem.Oracle;
+import org.notchwork.problem.Promise;
 import org.notchwork.strategy.classical.DifferenceCover;
 import org.notchwork.strategy.classical.RandomDraws;
 import org.notchwork.strategy.classical.SequentialScan;
@@ -29,7 +30,7 @@ class OrderOfQueriesTest {
 
     private static List<Long> points(ClassicalStrategy strategy, int width, long number) {
         Recording function = new Recording(width);
-        Oracle oracle = new Oracle(function, new Meter(1L << (width + 1)));
+        Oracle oracle = new Oracle(function, Promise.period(Promise.Labels.RANDOM), new Meter(1L << (width + 1)));
         assertInstanceOf(Attempt.Censored.class, strategy.attempt(oracle, Streams.numbered("order " + width, number)));
         return function.points();
     }

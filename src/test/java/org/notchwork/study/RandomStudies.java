@@ -77,6 +77,7 @@ final class RandomStudies {
         List<String[]> all = new ArrayList<>();
         CLASSICAL.forEach(name -> all.add(new String[] {name}));
         Engines.names().stream()
+                .filter(engine -> !engine.equals("stabilizer"))
                 .filter(engine -> withStateVector || !engine.equals("statevector"))
                 .forEach(engine -> all.add(new String[] {"fourier-sampling", engine}));
         List<String[]> chosen = new ArrayList<>();
@@ -91,7 +92,11 @@ final class RandomStudies {
         int greatest = instances;
         for (String[] choice : choices) {
             String engine = choice[choice.length - 1];
-            greatest = Math.min(greatest, engine.equals("statevector") ? 13 : engine.equals("fibre") ? 26 : 63);
+            greatest = Math.min(
+                    greatest,
+                    engine.equals("statevector")
+                            ? 13
+                            : engine.equals("fibre") ? 26 : engine.equals("weights") ? 24 : 63);
         }
         return greatest;
     }

@@ -26,8 +26,8 @@ class StudyReaderTest {
         return Stream.of(
                 fault(
                         "\"notchwork-study/1\"",
-                        "\"notchwork-study/2\"",
-                        "/format: \"notchwork-study/2\"; \"notchwork-study/1\" is wanted"),
+                        "\"notchwork-study/3\"",
+                        "/format: \"notchwork-study/3\"; \"notchwork-study/1\" or \"notchwork-study/2\" is wanted"),
                 fault(
                         "\"title\": \"A small study of an invented lock\"",
                         "\"title\": \"\"",
@@ -117,7 +117,8 @@ class StudyReaderTest {
                 fault(
                         "\"kind\": \"xor-period\", \"instances\": \"table\"",
                         "\"instances\": \"table\"",
-                        "/experiments/0/problem/kind: this member is missing; one of xor-period is wanted"),
+                        "/experiments/0/problem/kind: this member is missing; one of xor-period, xor-period-or-none, hidden-subspace, "
+                                + "inner-product, constant-or-balanced, affine-period, even-mansour, feistel-three, table is wanted"),
                 fault(
                         "\"sequential-scan\"",
                         "\"sequential-scam\"",
@@ -125,7 +126,7 @@ class StudyReaderTest {
                 fault(
                         "{ \"name\": \"random-draws\" }",
                         "{ \"name\": \"sequential-scan\" }",
-                        "/experiments/0/strategies/1: a second sequential-scan; strategies of an experiment must differ"),
+                        "/experiments/0/strategies/1: a second sequential-scan; another strategy, or a \"label\" of its own, is wanted"),
                 fault(
                         "\"engine\": \"statevector\"",
                         "\"engine\": \"fibre\"",
@@ -141,7 +142,7 @@ class StudyReaderTest {
                 fault(
                         "\"name\": \"fourier-sampling\", \"engine\": \"statevector\"",
                         "\"name\": \"fourier-sampling\"",
-                        "/experiments/0/strategies/3/engine: this member is missing; fourier-sampling is a quantum strategy; one of"),
+                        "/experiments/0/strategies/3/engine: this member is missing; fourier-sampling is a quantum strategy; auto or one of"),
                 fault("\"id\": \"b\"", "\"id\": \"a\"", "/claims/1/id: a second claim \"a\"; ids must differ"),
                 fault(
                         "all/5/fourier-sampling@fibre\", \"at-most\"",

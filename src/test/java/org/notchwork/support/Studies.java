@@ -6,10 +6,13 @@ import java.util.Optional;
 import org.notchwork.catalogue.Engines;
 import org.notchwork.catalogue.Strategies;
 import org.notchwork.engine.Engine;
+import org.notchwork.engine.Noise;
+import org.notchwork.json.Fault;
+import org.notchwork.json.Fields;
+import org.notchwork.json.JsonObject;
 import org.notchwork.problem.period.Labelling;
 import org.notchwork.problem.period.XorPeriod;
 import org.notchwork.seed.Seed;
-import org.notchwork.seed.SeedTree;
 import org.notchwork.strategy.QuantumStrategy;
 import org.notchwork.strategy.Strategy;
 import org.notchwork.study.Experiment;
@@ -25,13 +28,24 @@ public final class Studies {
 
     private Studies() {}
 
-    /** Returns every strategy, the quantum ones once with each engine. */
+    /** Returns a strategy by name, with its defaults. */
+    public static Strategy strategy(String name) {
+        List<Fault> faults = new ArrayList<>();
+        Fields none = Fields.of(JsonObject.builder().build(), "", faults);
+        Strategy strategy = Strategies.form(name).orElseThrow().configure(none, Noise.NONE);
+        if (!faults.isEmpty()) {
+            throw new IllegalArgumentException(name + " has no defaults: " + faults);
+        }
+        return strategy;
+    }
+
+    /** Returns four strategies for periods, the quantum one once with each engine that is always compared. */
     public static List<StrategyChoice> allChoices() {
         List<StrategyChoice> choices = new ArrayList<>();
-        for (String name : Strategies.names()) {
-            Strategy strategy = Strategies.strategy(name).orElseThrow();
+        for (String name : List.of("sequential-scan", "random-draws", "difference-cover", "fourier-sampling")) {
+            Strategy strategy = Studies.strategy(name);
             if (strategy instanceof QuantumStrategy) {
-                for (Engine engine : Engines.all()) {
+                for (Engine engine : Engines.reference()) {
                     choices.add(new StrategyChoice(strategy, Optional.of(engine)));
                 }
             } else {
@@ -43,7 +57,7 @@ public final class Studies {
 
     /** Returns the choice of a strategy without an engine. */
     public static StrategyChoice classical(String name) {
-        return new StrategyChoice(Strategies.strategy(name).orElseThrow(), Optional.empty());
+        return new StrategyChoice(Studies.strategy(name), Optional.empty());
     }
 
     /** Returns an experiment named {@code main} on random tables. */
@@ -59,7 +73,7 @@ public final class Studies {
 
     /** Returns a runner on the seed of these studies. */
     public static TrialRunner runner() {
-        return new TrialRunner(new SeedTree(SEED));
+        return new TrialRunner(new Study("A test", "Does it hold?", SEED, List.of(), 8, List.of()));
     }
 
     /** Returns all trials of an experiment, one after the other. */

@@ -41,8 +41,9 @@ public final class AnnihilatorEngine implements SightedEngine {
                     + (affine ? "engine stabilizer reaches it" : "no engine reaches it"));
         }
         if (!problem.promise().isExact() || problem.isPromiseBroken()) {
-            return Optional.of("annihilator samples what theory gives where the promise holds, and this one holds nearly"
-                    + " at best; engine weights takes any function");
+            return Optional.of(
+                    "annihilator samples what theory gives where the promise holds, and this one holds nearly"
+                            + " at best; engine weights takes any function");
         }
         if (problem.promise().question() == Question.CONSTANT_OR_BALANCED) {
             return Optional.of("annihilator knows only whether the outcome is 0, which is the answer itself; engine"

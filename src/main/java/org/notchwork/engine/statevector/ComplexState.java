@@ -106,8 +106,7 @@ final class ComplexState {
             for (int z = 0; z < 1 << values; z++) {
                 long a = real[base + z];
                 long b = imaginary[base + z];
-                sum = Math.addExact(
-                        sum, Math.addExact(Math.multiplyExact(a, a), Math.multiplyExact(b, b)));
+                sum = Math.addExact(sum, Math.addExact(Math.multiplyExact(a, a), Math.multiplyExact(b, b)));
             }
             weights[y] = sum;
         }

@@ -121,8 +121,7 @@ public record FeistelThree(boolean hasPermutations) implements Problem {
     static Instance feistel(int half, List<LongUnaryOperator> rounds) {
         long period = 1L << half | (rounds.get(0).applyAsLong(0) ^ rounds.get(0).applyAsLong(1));
         return new Instance(
-                sampled(half, block -> encrypted(block, half, rounds)),
-                new Answer.Period(Word.of(half + 1, period)));
+                sampled(half, block -> encrypted(block, half, rounds)), new Answer.Period(Word.of(half + 1, period)));
     }
 
     private static Instance random(int half, RandomStream stream) {

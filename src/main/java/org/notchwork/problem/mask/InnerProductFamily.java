@@ -19,6 +19,7 @@ public final class InnerProductFamily implements Family {
 
     @Override
     public Optional<Problem> configure(Fields settings, Attachments files) {
-        return Optional.of(new InnerProduct(settings.optionalTruth("constant-bit").orElse(false)));
+        return Optional.of(
+                new InnerProduct(settings.optionalTruth("constant-bit").orElse(false)));
     }
 }

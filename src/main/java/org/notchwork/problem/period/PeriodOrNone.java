@@ -78,7 +78,6 @@ public record PeriodOrNone(Labelling labelling) implements Problem {
         return List.of();
     }
 
-
     private XorPeriod withPeriod() {
         return new XorPeriod(labelling);
     }

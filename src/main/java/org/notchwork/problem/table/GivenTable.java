@@ -20,8 +20,7 @@ final class GivenTable implements Problem {
     private final PromiseSearch.Found found;
     private final String digest;
 
-    GivenTable(
-            Attachment file, int width, int[] values, Declared declared, PromiseSearch.Found found, String digest) {
+    GivenTable(Attachment file, int width, int[] values, Declared declared, PromiseSearch.Found found, String digest) {
         this.file = file;
         this.width = width;
         this.values = values;

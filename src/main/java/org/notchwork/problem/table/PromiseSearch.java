@@ -34,9 +34,8 @@ final class PromiseSearch {
         return switch (declared.kind()) {
             case XOR_PERIOD -> search.subspace(1, true);
             case HIDDEN_SUBSPACE -> search.subspace(declared.dimension(), false);
-            case XOR_PERIOD_OR_NONE -> search.isInjective()
-                    ? new Found(new Answer.NoPeriod(), Optional.empty())
-                    : search.subspace(1, true);
+            case XOR_PERIOD_OR_NONE ->
+                search.isInjective() ? new Found(new Answer.NoPeriod(), Optional.empty()) : search.subspace(1, true);
             case INNER_PRODUCT -> search.mask();
             case CONSTANT_OR_BALANCED -> search.balance();
         };

@@ -22,7 +22,7 @@ public final class TableFamily implements Family {
     public static final String KIND = "table";
 
     private static final int GREATEST_WIDTH = 16;
-    private static final Pattern FILE = Pattern.compile("[A-Za-z0-9][A-Za-z0-9._-]{0,99}\\.(csv|json)");
+    private static final Pattern FILE = Pattern.compile("[A-Za-z0-9][A-Za-z0-9._-]{0,80}\\.(csv|json)");
     private static final String FILE_MEND = "a file name ending in .csv or .json, without a folder, is wanted";
     private static final Pattern DIGEST = Pattern.compile("[0-9a-f]{64}");
 

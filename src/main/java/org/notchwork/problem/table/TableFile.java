@@ -79,7 +79,10 @@ final class TableFile {
 
     private static String text(byte[] bytes) throws Fault {
         try {
-            return StandardCharsets.UTF_8.newDecoder().decode(ByteBuffer.wrap(bytes)).toString();
+            return StandardCharsets.UTF_8
+                    .newDecoder()
+                    .decode(ByteBuffer.wrap(bytes))
+                    .toString();
         } catch (CharacterCodingException e) {
             throw new Fault("it is not UTF-8");
         }

@@ -43,7 +43,8 @@ public record BalanceSampling(int queries) implements ClassicalStrategy {
         return Answering.only(NAME, problem, Set.of(Question.CONSTANT_OR_BALANCED))
                 .or(() -> width >= 31 || queries <= 1 << width
                         ? Optional.empty()
-                        : Optional.of(NAME + " asks " + queries + " different points and width " + width + " has fewer"));
+                        : Optional.of(
+                                NAME + " asks " + queries + " different points and width " + width + " has fewer"));
     }
 
     @Override

@@ -41,7 +41,8 @@ public final class CycleWalk implements ClassicalStrategy {
 
     @Override
     public Optional<String> refusal(Problem problem, int width) {
-        return Answering.exactly(name(), problem, Set.of(Question.PERIOD)).or(() -> PeriodByCollision.tooWide(name(), width));
+        return Answering.exactly(name(), problem, Set.of(Question.PERIOD))
+                .or(() -> PeriodByCollision.tooWide(name(), width));
     }
 
     @Override
@@ -80,9 +81,7 @@ public final class CycleWalk implements ClassicalStrategy {
         Word shared = Word.of(width, walk.value);
         Pair pair = new Pair(Word.of(width, walk.before), Word.of(width, walk.beside), shared, shared);
         return new Attempt.Answered(
-                new Answer.Period(pair.x().xor(pair.y())),
-                new Certificate.Collision(pair),
-                new Usage(0, MEMORY_WORDS));
+                new Answer.Period(pair.x().xor(pair.y())), new Certificate.Collision(pair), new Usage(0, MEMORY_WORDS));
     }
 
     /** One walk: after {@link #run} the two points with one value, or one and the same if it started on its cycle. */

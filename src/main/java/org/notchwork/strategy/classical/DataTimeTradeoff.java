@@ -61,7 +61,8 @@ public record DataTimeTradeoff(Optional<Integer> dataBits) implements ClassicalS
         return Answering.only(NAME, problem, Set.of(Question.PERIOD))
                 .or(() -> problem.functions().contains(EvenMansour.CIPHER)
                         ? Optional.empty()
-                        : Optional.of(NAME + " calls a cipher and its permutation, and " + problem.kind() + " has none"))
+                        : Optional.of(
+                                NAME + " calls a cipher and its permutation, and " + problem.kind() + " has none"))
                 .or(() -> dataBits.filter(d -> d > width - 2).isEmpty()
                         ? Optional.empty()
                         : Optional.of(NAME + " asks 2^" + dataBits.get() + " pairs, and width " + width
@@ -122,8 +123,8 @@ public record DataTimeTradeoff(Optional<Integer> dataBits) implements ClassicalS
                 long sum = permutation.query(y) ^ permutation.query(y ^ 1);
                 long index = sums.find(sum);
                 if (index != SeenValues.NONE) {
-                    Optional<Attempt> found =
-                            tried(plain[(int) index] ^ y, (int) index).or(() -> tried(plain[(int) index] ^ y ^ 1, (int) index));
+                    Optional<Attempt> found = tried(plain[(int) index] ^ y, (int) index)
+                            .or(() -> tried(plain[(int) index] ^ y ^ 1, (int) index));
                     if (found.isPresent()) {
                         return found.get();
                     }

@@ -88,6 +88,7 @@ public record DistinguishedPoints(int bits, int trails) implements ClassicalStra
         private final long[] ends = new long[trails];
         /** The length of the trail in each slot; 0 marks a free one. */
         private final long[] lengths = new long[trails];
+
         private final Usage usage = new Usage(0, (long) WORDS_A_TRAIL * trails);
 
         Search(Oracle oracle, RandomStream stream) {

@@ -32,11 +32,9 @@ final class FirstDifference {
                         Word.of(width, point),
                         Word.of(oracle.valueWidth(), value),
                         Word.of(oracle.valueWidth(), other));
-                return new Attempt.Answered(
-                        new Answer.Balance(true), new Certificate.Difference(pair), USAGE);
+                return new Attempt.Answered(new Answer.Balance(true), new Certificate.Difference(pair), USAGE);
             }
         }
-        return new Attempt.Answered(
-                new Answer.Balance(false), new Certificate.Absent(most + " equal values"), USAGE);
+        return new Attempt.Answered(new Answer.Balance(false), new Certificate.Absent(most + " equal values"), USAGE);
     }
 }

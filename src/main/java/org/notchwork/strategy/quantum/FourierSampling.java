@@ -34,6 +34,9 @@ import org.notchwork.strategy.Usage;
  */
 public final class FourierSampling implements QuantumStrategy {
 
+    /** Of wider words the n - 1 equations would fill more than a line: the pair alone is the certificate. */
+    private static final int WIDEST_LISTED = 256;
+
     @Override
     public String name() {
         return "fourier-sampling";
@@ -52,8 +55,7 @@ public final class FourierSampling implements QuantumStrategy {
 
     @Override
     public Optional<String> refusal(Problem problem, int width) {
-        return Answering.only(
-                name(), problem, Set.of(Question.PERIOD, Question.PERIOD_OR_NONE, Question.SUBSPACE));
+        return Answering.only(name(), problem, Set.of(Question.PERIOD, Question.PERIOD_OR_NONE, Question.SUBSPACE));
     }
 
     @Override
@@ -92,6 +94,9 @@ public final class FourierSampling implements QuantumStrategy {
         Word zero = new Word(oracle.width(), BigInteger.ZERO);
         Word candidate = found.complement().get(0);
         Pair confirmation = new Pair(zero, candidate, oracle.confirm(zero), oracle.confirm(candidate));
+        if (oracle.width() > WIDEST_LISTED) {
+            return new Attempt.Answered(new Answer.Period(candidate), new Certificate.Collision(confirmation), usage);
+        }
         boolean isNone = oracle.promise().question() == Question.PERIOD_OR_NONE && !confirmation.collides();
         return new Attempt.Answered(
                 isNone ? new Answer.NoPeriod() : new Answer.Period(candidate),

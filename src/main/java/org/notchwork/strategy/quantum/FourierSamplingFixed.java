@@ -65,7 +65,8 @@ public record FourierSamplingFixed(Rounds rounds, Decoder decoder) implements Qu
     @Override
     public Optional<String> refusal(Problem problem, int width) {
         return Answering.only(NAME, problem, Set.of(Question.PERIOD, Question.PERIOD_OR_NONE))
-                .or(() -> problem.promise().question() == Question.PERIOD_OR_NONE && !decoder.name().equals("elimination")
+                .or(() -> problem.promise().question() == Question.PERIOD_OR_NONE
+                                && !decoder.name().equals("elimination")
                         ? Optional.of("decoder " + decoder.name() + " always names a period; where there may be none,"
                                 + " elimination decides")
                         : Optional.empty())
@@ -99,8 +100,7 @@ public record FourierSamplingFixed(Rounds rounds, Decoder decoder) implements Qu
         }
         Usage usage = new Usage(words.length, words.length);
         if (oracle.promise().question() == Question.PERIOD_OR_NONE && independent.rank() == width) {
-            return new Attempt.Answered(
-                    new Answer.NoPeriod(), new Certificate.Spanning(independent.words()), usage);
+            return new Attempt.Answered(new Answer.NoPeriod(), new Certificate.Spanning(independent.words()), usage);
         }
         Optional<Long> period = decoder.decode(width, words, stream);
         if (period.isEmpty()) {

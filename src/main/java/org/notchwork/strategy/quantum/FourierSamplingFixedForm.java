@@ -38,13 +38,13 @@ public final class FourierSamplingFixedForm implements StrategyForm {
             settings.faults()
                     .add(new Fault(
                             settings.pointer(),
-                            isExtra ? "\"rounds\" and \"extra-rounds\" at once" : "a fixed number of rounds without the number",
+                            isExtra
+                                    ? "\"rounds\" and \"extra-rounds\" at once"
+                                    : "a fixed number of rounds without the number",
                             "either \"rounds\" or \"extra-rounds\" (beyond n - 1) is wanted"));
             return new Rounds(false, 1);
         }
-        return new Rounds(
-                isExtra,
-                (int) settings.integer(isExtra ? "extra-rounds" : "rounds", isExtra ? 0 : 1, MOST));
+        return new Rounds(isExtra, (int) settings.integer(isExtra ? "extra-rounds" : "rounds", isExtra ? 0 : 1, MOST));
     }
 
     private static Decoder decoder(Fields settings, Noise noise) {

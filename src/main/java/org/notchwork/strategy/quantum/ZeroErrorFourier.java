@@ -57,13 +57,12 @@ public final class ZeroErrorFourier implements QuantumStrategy {
     @Override
     public Optional<String> refusal(Problem problem, int width) {
         return Answering.only(name(), problem, Set.of(Question.PERIOD))
-                .or(() -> problem.promise().isExact()
+                .or(() -> problem.promise().isExact() && !problem.isPromiseBroken()
                         ? Optional.empty()
                         : Optional.of(name() + " is certain only where the promise holds exactly; fourier-sampling"
                                 + " takes " + problem.kind()))
-                .or(() -> width <= 63
-                        ? Optional.empty()
-                        : Optional.of(name() + " keeps words of 63 bits, not " + width));
+                .or(() ->
+                        width <= 63 ? Optional.empty() : Optional.of(name() + " keeps words of 63 bits, not " + width));
     }
 
     @Override

@@ -14,6 +14,7 @@ import org.notchwork.problem.BitFunction;
 import org.notchwork.problem.Instance;
 import org.notchwork.problem.Meter;
 import org.notchwork.problem.Oracle;
+import org.notchwork.problem.Promise;
 import org.notchwork.problem.Unitary;
 import org.notchwork.problem.period.Labelling;
 import org.notchwork.problem.period.XorPeriod;
@@ -35,7 +36,7 @@ class FourierSamplingTest {
             Attempt attempt = new FourierSampling()
                     .attempt(
                             new FibreEngine().open(new Unitary(injective, meter)),
-                            new Oracle(injective, meter),
+                            new Oracle(injective, Promise.period(Promise.Labels.RANDOM), meter),
                             stream(6, trial));
             Attempt.Answered answered = assertInstanceOf(Attempt.Answered.class, attempt);
             assertTrue(CertificateCheck.check(injective, answered.answer(), answered.certificate())
@@ -51,7 +52,7 @@ class FourierSamplingTest {
         Attempt attempt = new FourierSampling()
                 .attempt(
                         new AnnihilatorEngine().open(new Unitary(instance.function(), meter), instance.hidden()),
-                        new Oracle(instance.function(), meter),
+                        new Oracle(instance.function(), Promise.period(Promise.Labels.RANDOM), meter),
                         stream(width, 1));
         assertEquals(
                 instance.hidden(),
