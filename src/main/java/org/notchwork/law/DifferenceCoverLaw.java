@@ -41,6 +41,24 @@ public final class DifferenceCoverLaw implements QueryLaw {
         return OptionalLong.of((1L << a) + (l == 0 ? Long.highestOneBit(j) : j));
     }
 
+    /** Counts the periods of each of the three cases that are met by the m-th query. */
+    @Override
+    public Optional<Prediction> within(int width, long queries) {
+        int a = width / 2;
+        long block = 1L << a;
+        long others = 1L << (width - a);
+        long multiples = Math.max(0, Math.min(queries - block, others - 1));
+        BigInteger met = BigInteger.valueOf(upToTop(Math.min(queries - 1, block - 1)))
+                .add(BigInteger.valueOf(multiples).multiply(BigInteger.valueOf(block - 1)))
+                .add(BigInteger.valueOf(upToTop(multiples)));
+        return Optional.of(Prediction.ratio(met, periods(width)));
+    }
+
+    /** How many words have their top set bit not above that of {@code last}. */
+    private static long upToTop(long last) {
+        return last < 1 ? 0 : 2 * Long.highestOneBit(last) - 1;
+    }
+
     @Override
     public String formula() {
         return "[S(a, 1) + (2^a - 1) sum_{j=1}^{2^b-1} (2^a + j) + S(b, 2^a)] / (2^n - 1),"

@@ -41,6 +41,22 @@ public final class RandomDrawsLaw implements QueryLaw {
         return OptionalLong.empty();
     }
 
+    /**
+     * Returns 1 − ∏_{i&lt;m} (N − 2i)/(N − i), N = 2^n; empty where it takes more than 2^13 factors.
+     */
+    @Override
+    public Optional<Prediction> within(int width, long queries) {
+        if (queries > 1L << (width - 1)) {
+            return Optional.of(Fraction.ONE.prediction());
+        }
+        if (queries > Fraction.MOST_FACTORS) {
+            return Optional.empty();
+        }
+        BigInteger points = BigInteger.ONE.shiftLeft(width);
+        return Optional.of(
+                Fraction.falling(points, 2, points, queries).complement().prediction());
+    }
+
     @Override
     public String formula() {
         return "4^M / C(2M, M), M = 2^(n-1)";

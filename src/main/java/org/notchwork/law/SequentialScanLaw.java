@@ -31,6 +31,16 @@ public final class SequentialScanLaw implements QueryLaw {
         return OptionalLong.of(Long.highestOneBit(period) + 1);
     }
 
+    /** The first 2^h + 1 points meet the periods below 2^(h+1), and the points up to 2^(h+1) no others. */
+    @Override
+    public Optional<Prediction> within(int width, long queries) {
+        long last = Math.min(queries - 1, 1L << (width - 1));
+        BigInteger met = last < 1
+                ? BigInteger.ZERO
+                : BigInteger.valueOf(Long.highestOneBit(last)).shiftLeft(1).subtract(BigInteger.ONE);
+        return Optional.of(Prediction.ratio(met, size(width).subtract(BigInteger.ONE)));
+    }
+
     @Override
     public String formula() {
         return "(2^n + 4) / 3";

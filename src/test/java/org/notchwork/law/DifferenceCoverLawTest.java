@@ -53,6 +53,7 @@ class DifferenceCoverLawTest {
             listed.add(count);
         }
         listed.assertAre(law, width);
+        listed.assertDistributionIs(law, width);
     }
 
     private static long walk(int width, long s) {

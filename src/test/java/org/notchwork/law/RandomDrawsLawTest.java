@@ -8,6 +8,7 @@ import java.io.IOException;
 import java.math.BigDecimal;
 import java.math.BigInteger;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalLong;
 import org.junit.jupiter.api.Test;
@@ -137,5 +138,49 @@ class RandomDrawsLawTest {
     @Test
     void countsOfAPeriodDependOnChance() {
         assertEquals(OptionalLong.empty(), law.queries(8, 1));
+    }
+
+    /** Section B, the full distributions at n = 2, 3, 4. */
+    @Test
+    void theDistributionsOfTheCheckValuesAreMet() throws IOException {
+        JsonNode distributions = CheckValues.section("B").required("distribution");
+        assertEquals(3, distributions.size());
+        for (Map.Entry<String, JsonNode> width : distributions.properties()) {
+            Fraction sum = Fraction.ZERO;
+            for (Map.Entry<String, JsonNode> count : width.getValue().properties()) {
+                List<String> parts = List.of(count.getValue().asString().split("/", -1));
+                sum = sum.plus(new Fraction(new BigInteger(parts.get(0)), new BigInteger(parts.get(1))));
+                assertEquals(
+                        Optional.of(sum.prediction()),
+                        law.within(Integer.parseInt(width.getKey()), Long.parseLong(count.getKey())));
+            }
+            assertEquals(Fraction.ONE.prediction(), sum.prediction());
+        }
+    }
+
+    /** Section B, the least m with P(Q ≤ m) ≥ p, where the law gives a probability. */
+    @Test
+    void theQuantilesOfTheCheckValuesAreMet() throws IOException {
+        int checked = 0;
+        for (JsonNode row : CheckValues.section("B").required("table")) {
+            int width = row.required("n").asInt();
+            for (Map.Entry<String, JsonNode> quantile :
+                    row.required("quantiles_without").properties()) {
+                long m = quantile.getValue().asLong();
+                if (law.within(width, m).isPresent()) {
+                    BigDecimal p = new BigDecimal(quantile.getKey());
+                    assertTrue(law.within(width, m).orElseThrow().value().compareTo(p) >= 0);
+                    assertTrue(law.within(width, m - 1).orElseThrow().value().compareTo(p) < 0);
+                    checked++;
+                }
+            }
+        }
+        assertEquals(15 * 7 - 10, checked);
+    }
+
+    @Test
+    void aProbabilityThatTakesTooManyFactorsIsNotGiven() {
+        assertEquals(Optional.empty(), law.within(20, Fraction.MOST_FACTORS + 1));
+        assertEquals(Optional.of(Fraction.ONE.prediction()), law.within(20, (1L << 19) + 1));
     }
 }

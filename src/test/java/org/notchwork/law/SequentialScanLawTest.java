@@ -63,6 +63,7 @@ class SequentialScanLawTest {
             listed.add(x + 1);
         }
         listed.assertAre(law, width);
+        listed.assertDistributionIs(law, width);
     }
 
     @Test
