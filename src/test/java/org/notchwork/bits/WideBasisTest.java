@@ -116,7 +116,6 @@ class WideBasisTest {
         assertThrows(IllegalArgumentException.class, () -> basis.combination(tooMany));
     }
 
-    /** The rows are handed out as values: what is added later must not reach them. */
     @Test
     void rowsDoNotDependOnTheOrderOfAdding() {
         RandomStream stream = Streams.named("wide order");

@@ -18,7 +18,7 @@ class AgainstDenseStateTest {
 
     private static final double TOLERANCE = 1e-12;
 
-    /** Every gate between every pair of short beginnings, so that a fault in one gate has a name. */
+    /** All short circuits, so that a fault in one gate shows with little around it. */
     @Test
     void everySequenceOfFourGatesOnTwoQubits() {
         List<Circuit.Gate> gates = new ArrayList<>();

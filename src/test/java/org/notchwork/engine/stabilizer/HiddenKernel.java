@@ -27,8 +27,8 @@ record HiddenKernel(int n, BigInteger s, List<BigInteger> rows) {
         WideBasis span = new WideBasis(n);
         span.add(s);
         List<BigInteger> rows = new ArrayList<>(span.complement());
-        // Sums of rows with other rows keep them independent and make them dense.
-        for (int i = 0; n > 2 && i < 2 * n; i++) {
+        // Sums of rows with other rows keep them independent and, so many, make them dense.
+        for (int i = 0; n > 2 && i < 8 * n; i++) {
             int[] pair = stream.distinct(2, n - 1);
             rows.set(pair[0], rows.get(pair[0]).xor(rows.get(pair[1])));
         }

@@ -117,7 +117,6 @@ class OutcomeSpaceTest {
         }
     }
 
-    /** The space belongs to the state, not to the circuit: measuring what is sure rewrites no outcome. */
     @Test
     void theTableauStaysAsItIs() {
         Tableau tableau = TableauTest.ghz(4);
