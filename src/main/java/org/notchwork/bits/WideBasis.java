@@ -171,7 +171,7 @@ public final class WideBasis {
             int place = digits.length - 1 - i;
             // The highest byte may be one of sign, which is 0 and may lie beyond the width.
             if (digits[i] != 0) {
-                limbs[place >> 3] |= (long) Byte.toUnsignedInt(digits[i]) << (place * Byte.SIZE);
+                limbs[place >> 3] |= (long) Byte.toUnsignedInt(digits[i]) << (place % Long.BYTES * Byte.SIZE);
             }
         }
         return limbs;

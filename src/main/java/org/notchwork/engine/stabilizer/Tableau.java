@@ -165,7 +165,6 @@ public final class Tableau {
         long[] others = stabilizers.x[qubit].clone();
         long[] partners = destabilizers.x[qubit].clone();
         PauliRows.clear(others, pivot);
-        PauliRows.clear(partners, pivot);
         long[] signs = new long[high.length];
         for (int q = 0; q < qubits; q++) {
             if (PauliRows.bit(stabilizers.x[q], pivot)) {
