@@ -46,7 +46,7 @@ final class AllSecrets {
                 : choice.strategy().deterministic();
         return certain
                 && choice.noise().isNone()
-                && choice.law(experiment.problem()).isPresent()
+                && choice.law(experiment.problem(), width).isPresent()
                 && !experiment.problem().answers(width).isEmpty();
     }
 

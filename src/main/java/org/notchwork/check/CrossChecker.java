@@ -122,7 +122,7 @@ public final class CrossChecker {
                     width,
                     cell,
                     choice,
-                    choice.law(experiment.problem()).orElseThrow()));
+                    choice.law(experiment.problem(), width).orElseThrow()));
         }
         if (hasEngines(experiment)) {
             checks.add(check(CheckKind.ENGINES, subject, tally.engines(), text.engines() + sample(experiment, width)));
@@ -173,7 +173,7 @@ public final class CrossChecker {
         }
         for (StrategyChoice choice : experiment.strategies()) {
             CellFigures cell = figures.get(new Cell(experiment.id(), width, choice.label()));
-            choice.law(experiment.problem()).ifPresent(law -> checks.add(TheoryMean.check(cell, law)));
+            choice.law(experiment.problem(), width).ifPresent(law -> checks.add(TheoryMean.check(cell, law)));
         }
         for (StrategyChoice choice : experiment.strategies()) {
             checks.addAll(statistical.of(new Cell(experiment.id(), width, choice.label())));

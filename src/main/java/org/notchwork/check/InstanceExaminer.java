@@ -91,9 +91,7 @@ public final class InstanceExaminer {
     }
 
     private static boolean mayErr(Problem problem, StrategyChoice choice) {
-        return choice.successLaw(problem).isPresent()
-                || !choice.noise().isNone()
-                || !problem.promise().isExact();
+        return choice.strategy().mayErr() || !problem.promise().isExact();
     }
 
     private static String texts(List<Answer> answers) {

@@ -33,7 +33,7 @@ public final class LineChecks {
                 experiment
                         .choice(cell.label())
                         .filter(c -> c.strategy().deterministic())
-                        .flatMap(c -> c.law(experiment.problem()))
+                        .flatMap(c -> c.law(experiment.problem(), cell.width()))
                         .ifPresent(law -> {
                             laws.put(cell, law);
                             found.put(cell, Comparison.NONE);

@@ -64,7 +64,9 @@ final class StatisticalChecks {
             for (Cell cell : experiment.cells()) {
                 StrategyChoice choice = experiment.choice(cell.label()).orElseThrow();
                 Problem problem = experiment.problem();
-                choice.law(problem).flatMap(law -> distribution(cell, law)).ifPresent(tests::add);
+                choice.law(problem, cell.width())
+                        .flatMap(law -> distribution(cell, law))
+                        .ifPresent(tests::add);
                 choice.successLaw(problem).ifPresent(law -> tests.add(success(cell, law)));
                 if (isBounded(problem, choice)) {
                     tests.add(bound(cell));

@@ -12,8 +12,16 @@ import org.notchwork.exact.Decimals;
  */
 public final class FourierRoundsLaw implements QueryLaw {
 
+    /** Fractions of wider ones have more digits than anybody reads; decimals of 50 digits stand for them. */
+    private static final int WIDEST_EXACT = 64;
+
+    private static final int NEGLIGIBLE = 200;
+
     @Override
     public Prediction mean(int width) {
+        if (width > WIDEST_EXACT) {
+            return Prediction.decimal(waits(width));
+        }
         BigInteger top = BigInteger.ZERO;
         BigInteger bottom = BigInteger.ONE;
         for (int i = 1; i < width; i++) {
@@ -23,6 +31,15 @@ public final class FourierRoundsLaw implements QueryLaw {
             bottom = bottom.multiply(q);
         }
         return Prediction.ratio(top, bottom);
+    }
+
+    private static BigDecimal waits(int width) {
+        BigDecimal sum = BigDecimal.ZERO;
+        for (int i = 1; i < width; i++) {
+            BigInteger p = BigInteger.ONE.shiftLeft(i);
+            sum = sum.add(Decimals.quotient(p, p.subtract(BigInteger.ONE)), Decimals.CONTEXT);
+        }
+        return sum;
     }
 
     @Override
@@ -56,12 +73,25 @@ public final class FourierRoundsLaw implements QueryLaw {
             return Optional.of(Prediction.ratio(BigInteger.ZERO, BigInteger.ONE));
         }
         int m = Math.toIntExact(rounds);
+        if (width > WIDEST_EXACT) {
+            return Optional.of(Prediction.decimal(spanning(width - 1, m)));
+        }
         BigInteger all = BigInteger.ONE.shiftLeft(m);
         BigInteger top = BigInteger.ONE;
         for (int i = 0; i < width - 1; i++) {
             top = top.multiply(all.subtract(BigInteger.ONE.shiftLeft(i)));
         }
         return Optional.of(Prediction.ratio(top, BigInteger.ONE.shiftLeft(Math.multiplyExact(m, width - 1))));
+    }
+
+    /** ∏_{i&lt;r} (1 − 2^(i−m)): factors that differ from 1 by less than 2^−200 change nothing. */
+    private static BigDecimal spanning(int rank, int m) {
+        BigDecimal product = BigDecimal.ONE;
+        for (int i = Math.max(0, m - NEGLIGIBLE); i < rank; i++) {
+            BigInteger all = BigInteger.ONE.shiftLeft(m - i);
+            product = product.multiply(Decimals.quotient(all.subtract(BigInteger.ONE), all), Decimals.CONTEXT);
+        }
+        return product;
     }
 
     @Override

@@ -7,6 +7,11 @@ import java.util.OptionalLong;
 /** What theory says about the number of queries of a strategy on instances of a width. Stateless. */
 public interface QueryLaw {
 
+    /** Returns whether the law gives figures at a width; the other methods may throw where it does not. */
+    default boolean reaches(int width) {
+        return true;
+    }
+
     /** Returns the exact mean number of queries. */
     Prediction mean(int width);
 

@@ -33,6 +33,8 @@ final class QueryChart {
     /** Half the length of the mark of a law where there is one width only. */
     private static final double MARK = 0.4;
 
+    private static final int MOST_POINTS = 64;
+
     private static final int PLAIN_POWERS = 16;
     private static final double SPREAD = 0.22;
     private static final String SUPERSCRIPTS = "⁰¹²³⁴⁵⁶⁷⁸⁹";
@@ -47,7 +49,7 @@ final class QueryChart {
     QueryChart(Experiment experiment, List<CellFigures> cells) {
         this.experiment = experiment;
         this.cells = List.copyOf(cells);
-        boolean laws = experiment.strategies().stream().anyMatch(s -> law(s).isPresent());
+        boolean laws = experiment.strategies().stream().anyMatch(this::hasLaw);
         List<String> labels =
                 experiment.strategies().stream().map(QueryChart::label).toList();
         this.legend = new ChartLegend(labels, laws, font.deriveFont(13f), WIDTH - LEGEND_INSET);
@@ -86,8 +88,10 @@ final class QueryChart {
         return choice.label() + choice.sight().map(s -> " (" + s + ")").orElse("");
     }
 
-    private Optional<QueryLaw> law(StrategyChoice choice) {
-        return choice.law(experiment.problem());
+    /** Returns whether any width of the experiment has a law for a choice. */
+    private boolean hasLaw(StrategyChoice choice) {
+        return experiment.widths().stream()
+                .anyMatch(width -> choice.law(experiment.problem(), width).isPresent());
     }
 
     private static double shift(int series, int all) {
@@ -125,20 +129,23 @@ final class QueryChart {
     }
 
     private void curve(int series, StrategyChoice choice) {
-        Optional<QueryLaw> law = law(choice);
-        if (law.isEmpty()) {
-            return;
-        }
         List<Double> widths = new ArrayList<>();
         List<Double> means = new ArrayList<>();
         int from = experiment.widths().get(0);
         int to = experiment.widths().get(experiment.widths().size() - 1);
-        for (int width = from; width <= to; width++) {
-            widths.add((double) width);
-            means.add(log2(law.get().mean(width).value().doubleValue()));
+        int step = Math.max(1, (to - from) / MOST_POINTS);
+        for (int width = from; width <= to; width += step) {
+            Optional<QueryLaw> law = choice.law(experiment.problem(), width);
+            if (law.isPresent()) {
+                widths.add((double) width);
+                means.add(log2(law.get().mean(width).value().doubleValue()));
+            }
         }
-        if (from == to) {
-            widths = List.of(from - MARK, from + MARK);
+        if (widths.isEmpty()) {
+            return;
+        }
+        if (widths.size() == 1) {
+            widths = List.of(widths.get(0) - MARK, widths.get(0) + MARK);
             means = List.of(means.get(0), means.get(0));
         }
         hidden("law " + series, widths, means, Palette.color(series), Palette.law());

@@ -24,6 +24,11 @@ public sealed interface Strategy permits ClassicalStrategy, QuantumStrategy {
     /** Returns whether the query count depends on the hidden answer alone, not on chance or labels. */
     boolean deterministic();
 
+    /** Returns whether the strategy may answer wrong by design, even where the promise holds exactly. */
+    default boolean mayErr() {
+        return false;
+    }
+
     /** Returns about how many bytes an attempt at a width takes at most, within a query limit. */
     long memoryBytes(int width, long queryLimit);
 }

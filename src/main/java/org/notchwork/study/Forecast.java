@@ -93,7 +93,7 @@ public final class Forecast {
     private static CellForecast cell(Experiment experiment, int width, StrategyChoice choice) {
         Problem problem = experiment.problem();
         Optional<BigDecimal> mean =
-                choice.law(problem).map(law -> law.mean(width).value());
+                choice.law(problem, width).map(law -> law.mean(width).value());
         BigDecimal limit = BigDecimal.valueOf(experiment.queryLimit());
         BigDecimal queries = mean.orElseGet(() -> guess(problem, width)).min(limit);
         double perQuery = choice.engine().isPresent() ? sampling(choice.engine().get(), width, circuit(choice)) : QUERY;

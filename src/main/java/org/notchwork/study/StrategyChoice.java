@@ -65,9 +65,9 @@ public record StrategyChoice(
         return engine.map(e -> e.sight().word());
     }
 
-    /** Returns what theory says about the number of queries on a problem; empty if it says nothing. */
-    public Optional<QueryLaw> law(Problem problem) {
-        return Laws.queries(problem, strategy, noise);
+    /** Returns what theory says about the number of queries on a problem at a width; empty if it says nothing. */
+    public Optional<QueryLaw> law(Problem problem, int width) {
+        return Laws.queries(problem, strategy, noise).filter(law -> law.reaches(width));
     }
 
     /** Returns what theory says about the probability of a right answer on a problem; empty if it says nothing. */

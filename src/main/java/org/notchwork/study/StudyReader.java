@@ -31,7 +31,7 @@ public final class StudyReader {
     private static final int USUAL_CROSS_CHECK = 10;
     private static final int LONGEST_TITLE = 200;
     private static final int LONGEST_TEXT = 2000;
-    private static final int MOST_EXPERIMENTS = 8;
+    private static final int MOST_EXPERIMENTS = 16;
     private static final int MOST_CLAIMS = 100;
     private static final Pattern FORMATS = Pattern.compile(Pattern.quote(FORMAT) + "|" + Pattern.quote(SECOND_FORMAT));
 

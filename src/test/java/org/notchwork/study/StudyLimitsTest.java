@@ -170,7 +170,7 @@ class StudyLimitsTest {
         String eight = joined(8, i -> experiment("e" + i, 2, 3, "random-draws"));
         assertEquals(8, Studies.of(only(eight)).experiments().size());
         assertEquals(
-                List.of("/experiments: a list of 9; 1 to 8 items are wanted"),
+                List.of("/experiments: a list of 17; 1 to 16 items are wanted"),
                 lines(only(eight + ", " + experiment("e8", 2, 3, "random-draws"))));
     }
 

@@ -48,6 +48,11 @@ public record BalanceSampling(int queries) implements ClassicalStrategy {
     }
 
     @Override
+    public boolean mayErr() {
+        return true;
+    }
+
+    @Override
     public boolean deterministic() {
         return false;
     }

@@ -46,6 +46,11 @@ public final class CollisionCounting implements ClassicalStrategy {
     }
 
     @Override
+    public boolean mayErr() {
+        return true;
+    }
+
+    @Override
     public boolean deterministic() {
         return false;
     }

@@ -77,6 +77,11 @@ public record FourierSamplingFixed(Rounds rounds, Decoder decoder) implements Qu
     }
 
     @Override
+    public boolean mayErr() {
+        return true;
+    }
+
+    @Override
     public boolean deterministic() {
         return false;
     }
