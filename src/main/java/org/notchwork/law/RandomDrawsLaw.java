@@ -21,7 +21,12 @@ public final class RandomDrawsLaw implements QueryLaw {
 
     @Override
     public Prediction mean(int width) {
-        return width <= EXACT ? exact(width) : Prediction.decimal(series(width));
+        return exactMean(width).map(Fraction::prediction).orElseGet(() -> Prediction.decimal(series(width)));
+    }
+
+    /** Returns the mean as a fraction where its product is short. */
+    Optional<Fraction> exactMean(int width) {
+        return width <= EXACT ? Optional.of(exact(width)) : Optional.empty();
     }
 
     @Override
@@ -68,14 +73,14 @@ public final class RandomDrawsLaw implements QueryLaw {
     }
 
     /** The product over i = 1 … M of 2i / (2i − 1). */
-    private static Prediction exact(int width) {
+    private static Fraction exact(int width) {
         BigInteger top = BigInteger.ONE;
         BigInteger bottom = BigInteger.ONE;
         for (long i = 1; i <= 1L << (width - 1); i++) {
             top = top.multiply(BigInteger.valueOf(2 * i));
             bottom = bottom.multiply(BigInteger.valueOf(2 * i - 1));
         }
-        return Prediction.ratio(top, bottom);
+        return new Fraction(top, bottom);
     }
 
     /**
