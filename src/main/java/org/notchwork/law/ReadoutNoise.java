@@ -64,6 +64,22 @@ public record ReadoutNoise(BigDecimal flip) {
                 BigDecimal.ONE.divide(right.multiply(independent, Decimals.CONTEXT), Decimals.CONTEXT));
     }
 
+    /**
+     * Returns the number of rounds below which no decoder can be sure, log₂(2^n − 1)/(1 − h(τ)), h the binary entropy
+     * and τ = (1 − δ)/2.
+     */
+    public Prediction informationBound(int width, int weight) {
+        BigDecimal tau = BigDecimal.ONE.subtract(bias(weight)).divide(TWO, NaturalLogarithm.DIGITS);
+        BigDecimal told = NaturalLogarithm.of(TWO).add(entropyTerm(tau)).add(entropyTerm(BigDecimal.ONE.subtract(tau)));
+        BigDecimal words = new BigDecimal(BigInteger.ONE.shiftLeft(width).subtract(BigInteger.ONE));
+        return Prediction.decimal(NaturalLogarithm.of(words).divide(told, Decimals.CONTEXT));
+    }
+
+    /** q ln q, 0 at 0. */
+    private static BigDecimal entropyTerm(BigDecimal q) {
+        return q.signum() == 0 ? BigDecimal.ZERO : q.multiply(NaturalLogarithm.of(q), NaturalLogarithm.DIGITS);
+    }
+
     private BigDecimal likelihoodBound(int width, int weight, int rounds) {
         BigDecimal own = overlap(bias(weight));
         BigDecimal sum = BigDecimal.ZERO;

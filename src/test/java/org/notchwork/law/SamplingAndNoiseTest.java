@@ -80,11 +80,21 @@ class SamplingAndNoiseTest {
             BigDecimal printed =
                     new BigDecimal(row.required("pooled_expected_trials").asString());
             assertEquals(0, printed.compareTo(draws.round(new MathContext(8))), draws::toPlainString);
+            BigDecimal bound = noise.informationBound(width, weight).value();
+            BigDecimal six = new BigDecimal(row.required("info_lower").asString());
+            assertEquals(0, six.compareTo(bound.round(new MathContext(6))), bound::toPlainString);
         }
     }
 
     @Test
     void aFlipOfAHalfOrMoreIsRefused() {
         assertThrows(IllegalArgumentException.class, () -> new ReadoutNoise(new BigDecimal("0.5")));
+    }
+
+    /** OEIS A002162 and A002392. */
+    @Test
+    void logarithmsAreRight() {
+        assertPrints("0.693147180559945309417232121458176568", NaturalLogarithm.of(BigDecimal.valueOf(2)));
+        assertPrints("-2.302585092994045684017991454684364208", NaturalLogarithm.of(new BigDecimal("0.1")));
     }
 }
