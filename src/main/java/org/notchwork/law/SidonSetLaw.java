@@ -17,6 +17,7 @@ import java.util.OptionalLong;
 public final class SidonSetLaw implements QueryLaw {
 
     private static final int WIDEST = 32;
+
     /** Wider ones take seconds. */
     private static final int WIDEST_QUICK = 24;
 

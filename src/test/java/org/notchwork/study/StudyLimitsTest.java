@@ -167,11 +167,11 @@ class StudyLimitsTest {
         assertEquals(
                 "/experiments/0/strategies: a list of 13; 1 to 12 items are wanted",
                 lines(only(experiment("e", 2, 3, "sequential-scan", 13))).get(0));
-        String eight = joined(8, i -> experiment("e" + i, 2, 3, "random-draws"));
-        assertEquals(8, Studies.of(only(eight)).experiments().size());
+        String sixteen = joined(16, i -> experiment("e" + i, 2, 3, "random-draws"));
+        assertEquals(16, Studies.of(only(sixteen)).experiments().size());
         assertEquals(
                 List.of("/experiments: a list of 17; 1 to 16 items are wanted"),
-                lines(only(eight + ", " + experiment("e8", 2, 3, "random-draws"))));
+                lines(only(sixteen + ", " + experiment("e16", 2, 3, "random-draws"))));
     }
 
     @Test
