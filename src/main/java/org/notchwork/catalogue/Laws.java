@@ -6,6 +6,7 @@ import java.util.function.BiFunction;
 import org.notchwork.engine.Noise;
 import org.notchwork.law.BalancedSampleSuccess;
 import org.notchwork.law.BalancedScanLaw;
+import org.notchwork.law.CycleWalkLaw;
 import org.notchwork.law.DecidingRoundsLaw;
 import org.notchwork.law.DecidingSuccess;
 import org.notchwork.law.DifferenceCoverLaw;
@@ -24,6 +25,7 @@ import org.notchwork.law.SuccessLaw;
 import org.notchwork.law.UnitVectorsLaw;
 import org.notchwork.law.ZeroErrorLaw;
 import org.notchwork.problem.Problem;
+import org.notchwork.problem.Promise;
 import org.notchwork.problem.Question;
 import org.notchwork.strategy.Strategy;
 import org.notchwork.strategy.classical.BalanceSampling;
@@ -41,6 +43,12 @@ public final class Laws {
             new Entry(Question.PERIOD, "random-draws-repeating", any(new RandomDrawsRepeatingLaw())),
             new Entry(Question.PERIOD, "difference-cover", drawn(new DifferenceCoverLaw())),
             new Entry(Question.PERIOD, "sidon-set", drawn(new SidonSetLaw())),
+            new Entry(
+                    Question.PERIOD,
+                    "cycle-walk",
+                    (p, s) -> p.promise().labels() == Promise.Labels.RANDOM
+                            ? Optional.of(new CycleWalkLaw())
+                            : Optional.empty()),
             new Entry(Question.PERIOD, "affine-solve", any(new UnitVectorsLaw(true))),
             new Entry(Question.PERIOD, "fourier-sampling", any(new FourierRoundsLaw())),
             new Entry(Question.PERIOD, "zero-error-fourier", drawn(new ZeroErrorLaw())),

@@ -18,6 +18,11 @@ public enum CheckKind {
     THEORY_MEAN("observed mean against the exact expectation", "the law of the strategy", false),
     /** Accidental collisions are counted on the whole domain, and instances with a second exact period named. */
     ACCIDENTS("accidental collisions and second periods, counted", "exhaustive search, written apart", true),
+    /** A fixed number of samples names the period as often as the bound for near promises says, at least. */
+    SAMPLING_BOUND(
+            "success of a fixed number of samples against the bound for a promise that holds nearly",
+            "Kaplan, Leurent, Leverrier, Naya-Plasencia, CRYPTO 2016, theorem 1, sharper form",
+            true),
     /** The observed distribution of query counts fits the exact one: chi-squared, corrected by Holm. */
     QUERY_DISTRIBUTION("distribution of query counts against the exact one", "the law of the strategy", false),
     /** The observed rate of right answers fits the exact probability: binomial, corrected by Holm. */

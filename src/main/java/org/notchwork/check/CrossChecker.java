@@ -57,7 +57,7 @@ public final class CrossChecker {
             for (int width : experiment.widths()) {
                 if (isExhaustive(study, width)) {
                     InstanceTally tally = examined.getOrDefault(subject(experiment.id(), width), InstanceTally.NONE);
-                    exhaustive(experiment, width, tally, checks);
+                    exhaustive(experiment, width, tally, figures, checks);
                 }
                 fromLines(experiment, width, lines, figures, statistical, checks);
             }
@@ -92,6 +92,9 @@ public final class CrossChecker {
         called.add(new Called(CheckKind.EXHAUSTIVE_ANSWER, subject));
         if (!experiment.problem().promise().isExact()) {
             called.add(new Called(CheckKind.ACCIDENTS, subject));
+            SamplingBounds.choices(experiment)
+                    .forEach(choice -> called.add(new Called(
+                            CheckKind.SAMPLING_BOUND, new Cell(experiment.id(), width, choice.label()).id())));
         }
         onAllSecrets(experiment, width)
                 .forEach(choice -> called.add(
@@ -106,13 +109,21 @@ public final class CrossChecker {
         return experiment + "/" + width;
     }
 
-    private void exhaustive(Experiment experiment, int width, InstanceTally tally, List<CrossCheck> checks) {
+    private void exhaustive(
+            Experiment experiment,
+            int width,
+            InstanceTally tally,
+            Map<Cell, CellFigures> figures,
+            List<CrossCheck> checks) {
         String subject = subject(experiment.id(), width);
         PromiseText text = new PromiseText(experiment.problem());
         checks.add(check(CheckKind.PROMISE, subject, tally.promise(), text.promise()));
         checks.add(check(CheckKind.EXHAUSTIVE_ANSWER, subject, tally.answers(), text.answers()));
         if (!experiment.problem().promise().isExact()) {
             checks.add(accidents(subject, tally));
+            for (StrategyChoice choice : SamplingBounds.choices(experiment)) {
+                checks.add(SamplingBounds.check(figures.get(new Cell(experiment.id(), width, choice.label())), tally));
+            }
         }
         AllSecrets allSecrets = new AllSecrets(new SeedTree(study.seed()));
         for (StrategyChoice choice : onAllSecrets(experiment, width)) {

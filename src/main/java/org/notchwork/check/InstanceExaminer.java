@@ -79,6 +79,7 @@ public final class InstanceExaminer {
                 answers,
                 engines(experiment, instance, group),
                 right.accidents(),
+                SamplingBounds.of(experiment, instance),
                 right.answers().size() > 1 ? List.of(group.trial()) : List.of());
     }
 

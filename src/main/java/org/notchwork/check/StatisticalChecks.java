@@ -103,7 +103,9 @@ final class StatisticalChecks {
     }
 
     private Optional<Test> distribution(Cell cell, QueryLaw law) {
-        if (law.within(cell.width(), 0).isEmpty()) {
+        boolean isConstant =
+                law.variance(cell.width()).filter(v -> v.signum() == 0).isPresent();
+        if (isConstant || law.within(cell.width(), 0).isEmpty()) {
             return Optional.empty();
         }
         CellFigures cellFigures = figures.get(cell);

@@ -14,11 +14,20 @@ import org.notchwork.exact.Decimals;
  */
 public final class CycleWalkLaw implements QueryLaw {
 
+    private static final int NARROWEST_APART = 6;
+    private static final int WIDEST_QUICK = 20;
+
     private static final int WIDEST = 24;
 
     private static final BigDecimal NEGLIGIBLE = new BigDecimal("1e-65");
 
     /** Returns the mean of one attempt over the chance of success: the mean total if attempts were independent. */
+    /** Narrow functions are too few for restarts to be independent; wide ones take long. */
+    @Override
+    public boolean reaches(int width) {
+        return width >= NARROWEST_APART && width <= WIDEST_QUICK;
+    }
+
     @Override
     public Prediction mean(int width) {
         Attempt attempt = attempt(width);

@@ -45,7 +45,11 @@ final class LimitsSection {
         }
         lines.add("The seed was chosen by the author, and no plan was published beforehand that this program knows of."
                 + " A run on a seed of the reader's own is the remedy.");
-        lines.add("No noise is modelled; a query costs one, whatever it would cost on a machine.");
+        boolean isNoisy = results.study().experiments().stream()
+                .flatMap(e -> e.strategies().stream())
+                .anyMatch(c -> !c.noise().isNone());
+        lines.add((isNoisy ? "No noise but that of readout is modelled" : "No noise is modelled")
+                + "; a query costs one, whatever it would cost on a machine.");
         lines.add(
                 "Widths are toy sizes. Nothing here judges a deployed cipher; that belongs to qualified cryptographers"
                         + " and current standards.");

@@ -34,6 +34,9 @@ public final class Report {
                 new CoverSection(results, seal, environment).set(flow);
                 new ClaimsSection(results.claims()).set(flow);
                 new FiguresSection(results).set(flow);
+                new PartsSection(results).set(flow);
+                new NoiseSection(results).set(flow);
+                new ControlsSection(results).set(flow);
                 new RatiosSection(results).set(flow);
                 new CalibrationSection(results.checks()).set(flow);
                 new ChecksSection(results.checks()).set(flow);

@@ -1,5 +1,6 @@
 package org.notchwork.strategy;
 
+import java.util.OptionalInt;
 import org.notchwork.engine.Circuit;
 import org.notchwork.engine.Simulation;
 import org.notchwork.problem.Oracle;
@@ -14,6 +15,11 @@ public non-sealed interface QuantumStrategy extends Strategy {
     /** Returns whether the answer is right and the limit on rounds is kept for certain, so that all secrets are run. */
     default boolean isZeroError() {
         return false;
+    }
+
+    /** Returns how many Fourier samples every attempt at a width draws; empty if that depends on what is measured. */
+    default OptionalInt samples(int width) {
+        return OptionalInt.empty();
     }
 
     /** Returns whether the strategy makes sense of disturbed samples. */

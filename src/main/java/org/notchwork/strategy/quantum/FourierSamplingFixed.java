@@ -1,6 +1,7 @@
 package org.notchwork.strategy.quantum;
 
 import java.util.Optional;
+import java.util.OptionalInt;
 import java.util.Set;
 import org.notchwork.bits.Word;
 import org.notchwork.engine.Circuit;
@@ -55,6 +56,11 @@ public record FourierSamplingFixed(Rounds rounds, Decoder decoder) implements Qu
     @Override
     public Circuit circuit() {
         return Circuit.FOURIER;
+    }
+
+    @Override
+    public OptionalInt samples(int width) {
+        return OptionalInt.of(rounds.at(width));
     }
 
     @Override
