@@ -28,7 +28,12 @@ import org.notchwork.problem.Answer;
 import org.notchwork.problem.BitFunction;
 import org.notchwork.problem.Instance;
 import org.notchwork.problem.Meter;
+import org.notchwork.problem.Network;
+import org.notchwork.problem.NetworkFunction;
+import org.notchwork.problem.Oracle;
+import org.notchwork.problem.Part;
 import org.notchwork.problem.Problem;
+import org.notchwork.problem.Promise;
 import org.notchwork.problem.Unitary;
 import org.notchwork.seed.SeedTree;
 
@@ -120,6 +125,29 @@ class ArchitectureTest {
                 .resideOutsideOfPackage("org.notchwork.engine.annihilator..")
                 .and()
                 .doNotBelongToAnyOf(SightedEngine.class)
+                .should()
+                .dependOnClassesThat(secrets)
+                .check(HOUSE);
+    }
+
+    /** What a blind engine or a strategy is handed has no way on to the secret either. */
+    @Test
+    void whatIsHandedOutLeadsToNoSecret() {
+        DescribedPredicate<JavaClass> secrets = JavaClass.Predicates.assignableTo(Answer.class)
+                .or(JavaClass.Predicates.type(Instance.class))
+                .or(JavaClass.Predicates.type(Problem.class))
+                .as("answers, instances and problems");
+        noClasses()
+                .that()
+                .belongToAnyOf(
+                        Unitary.class,
+                        Oracle.class,
+                        Meter.class,
+                        Part.class,
+                        Network.class,
+                        NetworkFunction.class,
+                        BitFunction.class,
+                        Promise.class)
                 .should()
                 .dependOnClassesThat(secrets)
                 .check(HOUSE);

@@ -34,6 +34,7 @@ public final class LineChecks {
                         .choice(cell.label())
                         .filter(c -> c.strategy().deterministic())
                         .flatMap(c -> c.law(experiment.problem(), cell.width()))
+                        .filter(law -> law.queries(cell.width(), 1).isPresent())
                         .ifPresent(law -> {
                             laws.put(cell, law);
                             found.put(cell, Comparison.NONE);

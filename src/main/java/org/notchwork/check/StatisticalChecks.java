@@ -222,7 +222,7 @@ final class StatisticalChecks {
                 cell,
                 control.trials(),
                 expected,
-                isTold ? observed + ": FLAGGED, the engine is told" : observed,
+                isTold ? observed + (control.isFlagged() ? ": FLAGGED, " : ": ") + "the engine is told" : observed,
                 isTold ? Optional.empty() : Optional.of(control.p()));
     }
 }

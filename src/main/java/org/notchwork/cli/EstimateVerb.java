@@ -9,6 +9,7 @@ import org.apache.commons.cli.Options;
 import org.notchwork.exact.Decimals;
 import org.notchwork.json.CanonicalJson;
 import org.notchwork.json.JsonArray;
+import org.notchwork.json.JsonInteger;
 import org.notchwork.json.JsonObject;
 import org.notchwork.json.JsonValue;
 import org.notchwork.study.CellForecast;
@@ -85,13 +86,18 @@ final class EstimateVerb implements Verb {
                 .ifPresent(r -> terminal.out().println("note: " + c.cell().id() + ": " + r)));
     }
 
+    /** Returns whole microseconds; what is beyond 2^53 − 1 is beyond a lifetime and stands as that. */
+    private static long microseconds(double nanos) {
+        return (long) Math.min(nanos / 1000, JsonInteger.MAX);
+    }
+
     private static JsonObject json(List<CellForecast> cells, double nanos, long memory, int threads) {
         List<JsonValue> items = new ArrayList<>();
         for (CellForecast cell : cells) {
             items.add(JsonObject.builder()
                     .put("cell", cell.cell().id())
-                    .put("memory-bytes", cell.memoryBytes())
-                    .put("microseconds", (long) (cell.nanos() / 1000))
+                    .put("memory-bytes", Math.min(cell.memoryBytes(), JsonInteger.MAX))
+                    .put("microseconds", microseconds(cell.nanos()))
                     .put("queries", Decimals.text(cell.queries()))
                     .put("remark", cell.remark())
                     .put("trials", cell.trials())
@@ -100,8 +106,8 @@ final class EstimateVerb implements Verb {
         return JsonObject.builder()
                 .put("cells", new JsonArray(items))
                 .put("format", "notchwork-estimate/1")
-                .put("memory-bytes", Math.multiplyExact(memory, threads))
-                .put("microseconds", (long) (nanos / 1000))
+                .put("memory-bytes", (long) Math.min((double) memory * threads, JsonInteger.MAX))
+                .put("microseconds", microseconds(nanos))
                 .put("threads", threads)
                 .build();
     }

@@ -64,6 +64,29 @@ final class ResultsScreen {
         }
         table.print(out);
         out.println("queries: calls spent on finding the answer; confirming calls are counted apart");
+        for (CellFigures cell : results.summary().cells()) {
+            if (cell.unanswered() > 0) {
+                out.println("without an answer: " + cell.unanswered() + " trials of "
+                        + cell.cell().id());
+            }
+        }
+        controls(results);
+    }
+
+    private void controls(Results results) {
+        List<CellFigures> controlled = results.summary().cells().stream()
+                .filter(c -> c.control().isPresent())
+                .toList();
+        if (controlled.isEmpty()) {
+            return;
+        }
+        List<String> flagged = controlled.stream()
+                .filter(c -> c.control().orElseThrow().isFlagged())
+                .map(c -> c.cell().id() + c.sight().map(s -> " (" + s + ")").orElse(""))
+                .toList();
+        out.println("controls: " + controlled.size() + " cells faced functions that hide nothing; " + flagged.size()
+                + " flagged for naming what is not there");
+        flagged.forEach(cell -> out.println("  flagged: " + cell));
     }
 
     private void claims(List<ClaimResult> claims) {

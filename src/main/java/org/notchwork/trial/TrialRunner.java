@@ -58,7 +58,8 @@ public final class TrialRunner {
                 experiment.id(), width, trial, records, controls(experiment, width, trial, instance.hidden()));
     }
 
-    private List<ControlRecord> controls(Experiment experiment, int width, long trial, Answer secret) {
+    /** Lets every strategy that has a control at a width face what the controls of a trial face. */
+    public List<ControlRecord> controls(Experiment experiment, int width, long trial, Answer secret) {
         List<StrategyChoice> choices = study.controls(experiment, width);
         if (choices.isEmpty()) {
             return List.of();

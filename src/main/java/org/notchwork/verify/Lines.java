@@ -32,6 +32,19 @@ final class Lines {
                 * experiment.strategies().size();
     }
 
+    /** Returns the index, from 0, of the first line of an instance in its experiment's file of controls. */
+    static long firstControl(Study study, Experiment experiment, int width, long trial) {
+        long first = 0;
+        for (int narrower : experiment.widths()) {
+            long each = study.controls(experiment, narrower).size();
+            if (narrower == width) {
+                return first + trial * each;
+            }
+            first += each * experiment.trials();
+        }
+        throw new IllegalArgumentException("no width " + width + " in " + experiment.id());
+    }
+
     /** Returns the line, from 1, where a record belongs; empty if the experiment does not call for its trial. */
     static OptionalLong line(Experiment experiment, TrialRecord record) {
         int strategy = experiment.strategies().stream()

@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.NavigableSet;
 import java.util.TreeSet;
 import org.notchwork.bundle.Bag;
+import org.notchwork.bundle.ControlLine;
 import org.notchwork.bundle.Layout;
 import org.notchwork.bundle.TrialLine;
 import org.notchwork.catalogue.Engines;
@@ -20,6 +21,7 @@ import org.notchwork.seed.RandomStream;
 import org.notchwork.seed.SeedTree;
 import org.notchwork.study.Experiment;
 import org.notchwork.study.StrategyChoice;
+import org.notchwork.trial.ControlRecord;
 import org.notchwork.trial.TrialGroup;
 import org.notchwork.trial.TrialPool;
 import org.notchwork.trial.TrialRange;
@@ -93,12 +95,15 @@ final class SampleStage {
     private void run(Experiment experiment, NavigableSet<Long> chosen, LinePass.Listener listener)
             throws IOException, InterruptedException, WrittenLines.Stopped {
         String path = Layout.DATA + Layout.trials(experiment.id());
-        try (WrittenLines written = new WrittenLines(bag, path, options.limits().lineBytes(), findings)) {
+        String controls = files.study().hasControls(experiment) ? Layout.DATA + Layout.controls(experiment.id()) : path;
+        try (WrittenLines written = new WrittenLines(bag, path, options.limits().lineBytes(), findings);
+                WrittenLines writtenControls =
+                        new WrittenLines(bag, controls, options.limits().lineBytes(), findings)) {
             new TrialPool(options.threads())
                     .<Again, WrittenLines.Stopped>run(
                             ranges(experiment, chosen),
                             (e, width, trial) -> again(e, width, trial, chosen),
-                            (Again again) -> take(experiment, again, written, listener));
+                            (Again again) -> take(experiment, again, written, writtenControls, listener));
         }
     }
 
@@ -127,7 +132,8 @@ final class SampleStage {
                 records.add(runner.run(experiment, experiment.strategies().get(i), instance, trial));
             }
         }
-        TrialGroup group = new TrialGroup(experiment.id(), width, trial, records);
+        TrialGroup group = new TrialGroup(
+                experiment.id(), width, trial, records, runner.controls(experiment, width, trial, instance.hidden()));
         return new Again(
                 group,
                 CrossChecker.isExhaustive(files.study(), width)
@@ -135,7 +141,12 @@ final class SampleStage {
                         : InstanceTally.NONE);
     }
 
-    private void take(Experiment experiment, Again again, WrittenLines written, LinePass.Listener listener)
+    private void take(
+            Experiment experiment,
+            Again again,
+            WrittenLines written,
+            WrittenLines writtenControls,
+            LinePass.Listener listener)
             throws WrittenLines.Stopped {
         TrialGroup group = again.group();
         long first = Lines.first(experiment, group.width(), group.trial());
@@ -146,6 +157,10 @@ final class SampleStage {
                     TrialLine.write(record, choice, experiment.problem().functions()));
             compared++;
             listener.read();
+        }
+        long control = Lines.firstControl(files.study(), experiment, group.width(), group.trial());
+        for (ControlRecord record : group.controls()) {
+            writtenControls.compare(control++, ControlLine.write(record));
         }
         InstanceTally examined = again.examined();
         for (Comparison part : List.of(examined.promise(), examined.answers(), examined.engines())) {

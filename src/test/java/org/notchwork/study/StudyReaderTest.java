@@ -8,6 +8,7 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Optional;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -306,7 +307,8 @@ class StudyReaderTest {
     void everyCommittedStudyIsValidAndSaysThatItIsInvented() throws IOException {
         try (Stream<Path> files = Files.list(Path.of("configs"))) {
             for (Path file : files.filter(f -> f.toString().endsWith(".json")).toList()) {
-                StudyReading reading = StudyReader.read(Files.readAllBytes(file));
+                StudyReading reading =
+                        StudyReader.read(Files.readAllBytes(file), name -> bytes(file.resolveSibling(name)));
                 assertEquals(List.of(), reading.faults(), file.toString());
                 assertTrue(reading.study().orElseThrow().title().contains("invented"), file.toString());
             }
@@ -323,5 +325,13 @@ class StudyReaderTest {
 
     private static StudyReading read(String text) {
         return StudyReader.read(text.getBytes(StandardCharsets.UTF_8));
+    }
+
+    private static Optional<byte[]> bytes(Path file) {
+        try {
+            return Optional.of(Files.readAllBytes(file));
+        } catch (IOException e) {
+            return Optional.empty();
+        }
     }
 }
