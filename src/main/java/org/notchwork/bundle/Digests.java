@@ -2,6 +2,7 @@ package org.notchwork.bundle;
 
 import java.nio.charset.StandardCharsets;
 import java.security.MessageDigest;
+import java.util.HexFormat;
 import java.util.regex.Pattern;
 import org.apache.commons.codec.binary.Hex;
 import org.apache.commons.codec.digest.DigestUtils;
@@ -32,5 +33,10 @@ public final class Digests {
     /** Returns bytes as hexadecimal digits. */
     public static String text(byte[] digest) {
         return Hex.encodeHexString(digest);
+    }
+
+    /** Returns the bytes of a digest in the form that {@link #text} writes. */
+    public static byte[] bytes(String digits) {
+        return HexFormat.of().parseHex(digits);
     }
 }

@@ -78,7 +78,8 @@ public final class MerkleProof {
         return tree.root();
     }
 
-    private static byte[] node(byte[] left, byte[] right) {
+    /** Returns the hash of a node over two others. */
+    static byte[] node(byte[] left, byte[] right) {
         MessageDigest digest = Digests.sha256();
         digest.update((byte) 1);
         digest.update(left);

@@ -17,6 +17,9 @@ import org.notchwork.study.Study;
 /** Runs a study and leaves a sealed bundle. */
 final class RunVerb implements Verb {
 
+    /** Stands for a time that is withheld. */
+    private static final String ANONYMOUS_DAY = "1970-01-01T00:00:00Z";
+
     @Override
     public String name() {
         return "run";
@@ -43,6 +46,8 @@ final class RunVerb implements Verb {
                 .addOption(Arguments.valued("output", "FOLDER", "where the bundle goes; the study's name if left out"))
                 .addOption(Arguments.flag("replace", "replace a bundle that is there already"))
                 .addOption(Arguments.valued("threads", "N", "worker threads; one a processor if left out"))
+                .addOption(Arguments.flag(
+                        "anonymous", "for anonymous review: say nothing of machine and time; the seal is the same"))
                 .addOption(Arguments.flag("json", "print seal and outcome as one JSON object"));
     }
 
@@ -66,7 +71,7 @@ final class RunVerb implements Verb {
                                 workload.done(experiment, width);
                                 progress.at(workload.share(), experiment.id() + ", width " + width);
                             },
-                            () -> environment(start, threads));
+                            () -> line.hasOption("anonymous") ? anonymous() : environment(start, threads));
         } catch (IOException e) {
             throw new Refusal(Exit.UNFINISHED, IoText.of(e, target));
         } finally {
@@ -101,6 +106,18 @@ final class RunVerb implements Verb {
         String name = study.getFileName().toString();
         int dot = name.lastIndexOf('.');
         return Path.of(dot > 0 ? name.substring(0, dot) : name + "-bundle");
+    }
+
+    /** Says that it says nothing. */
+    private static Environment anonymous() {
+        return new Environment(
+                Version.program(),
+                ANONYMOUS_DAY,
+                ANONYMOUS_DAY,
+                0,
+                1,
+                "withheld: anonymous run",
+                "withheld: anonymous run");
     }
 
     private static Environment environment(Instant start, int threads) {

@@ -46,6 +46,7 @@ final class ShowVerb implements Verb {
     public Options options() {
         return new Options()
                 .addOption(Arguments.valued("trial", "CELL/NUMBER", "walk one trial as a referee would by hand"))
+                .addOption(Arguments.flag("proof", "with --trial: print its line and audit path as one JSON object"))
                 .addOption(Arguments.flag("json", "print the figures as one JSON object"));
     }
 
@@ -54,8 +55,11 @@ final class ShowVerb implements Verb {
         Path bundle = Arguments.onePath(this, operands);
         try {
             BundleContents contents = BundleContents.open(bundle, Limits.USUAL);
+            if (line.hasOption("proof") && !line.hasOption("trial")) {
+                throw new Refusal(Exit.USAGE, "--proof: --trial CELL/NUMBER says of which trial");
+            }
             if (line.hasOption("trial")) {
-                walk(contents, line.getOptionValue("trial"), terminal);
+                trial(contents, line, terminal);
             } else if (line.hasOption("json")) {
                 terminal.out().println(CanonicalJson.text(json(contents)));
             } else {
@@ -83,8 +87,9 @@ final class ShowVerb implements Verb {
                 .build();
     }
 
-    private void walk(BundleContents contents, String named, Terminal terminal)
+    private static void trial(BundleContents contents, CommandLine line, Terminal terminal)
             throws Refusal, IOException, BundleFault, BundleContents.Unreadable {
+        String named = line.getOptionValue("trial");
         int slash = named.lastIndexOf('/');
         String id = slash < 0 ? named : named.substring(0, slash);
         List<String> cells = contents.study().cells().stream().map(Cell::id).toList();
@@ -100,6 +105,12 @@ final class ShowVerb implements Verb {
         Experiment experiment = contents.study().experiment(cell.experiment()).orElseThrow();
         StrategyChoice choice = experiment.choice(cell.label()).orElseThrow();
         long number = number(named.substring(slash + 1), experiment.trials());
+        if (line.hasOption("proof")) {
+            terminal.out()
+                    .println(CanonicalJson.text(
+                            contents.proof(experiment, cell, number).write()));
+            return;
+        }
         TrialRecord trial = contents.trial(experiment, cell, number);
         new TrialWalk(new SeedTree(contents.study().seed()), terminal.out()).walk(experiment, choice, trial);
     }

@@ -50,6 +50,12 @@ public final class Fields {
         return new Fields(Optional.empty(), pointer, faults);
     }
 
+    /** Returns the object itself, whose members need not be asked for one by one. */
+    public JsonObject whole() {
+        known.addAll(object.members().keySet());
+        return object;
+    }
+
     /** Returns where this object stands: an RFC 6901 pointer. */
     public String pointer() {
         return pointer;

@@ -57,7 +57,7 @@ public final class Report {
      * Keeps the platform's drawing classes away from the screen, unless the user said otherwise. They would else ask
      * for one even if charts go to a file, and fail where the environment names a display that does not answer.
      */
-    private static void withoutScreen() {
+    static void withoutScreen() {
         if (System.getProperty(HEADLESS) == null) {
             System.setProperty(HEADLESS, "true");
         }

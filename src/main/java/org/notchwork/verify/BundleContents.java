@@ -8,17 +8,22 @@ import java.util.Optional;
 import org.notchwork.bundle.Bag;
 import org.notchwork.bundle.BundleFault;
 import org.notchwork.bundle.ClaimsFile;
+import org.notchwork.bundle.Digests;
 import org.notchwork.bundle.Layout;
 import org.notchwork.bundle.Limits;
 import org.notchwork.bundle.LineReader;
+import org.notchwork.bundle.MerklePath;
+import org.notchwork.bundle.MerkleTree;
 import org.notchwork.bundle.Results;
 import org.notchwork.bundle.SummaryReader;
 import org.notchwork.bundle.TrialLine;
+import org.notchwork.bundle.TrialProof;
 import org.notchwork.claim.ClaimResult;
 import org.notchwork.figure.Summary;
 import org.notchwork.json.Fault;
 import org.notchwork.json.JsonFault;
 import org.notchwork.json.JsonLimits;
+import org.notchwork.json.JsonObject;
 import org.notchwork.json.JsonReader;
 import org.notchwork.json.JsonValue;
 import org.notchwork.study.Cell;
@@ -88,6 +93,49 @@ public final class BundleContents {
             throw new Unreadable(faults.get(0).line());
         }
         return new Results(files.study(), summary, files.checks(), claims);
+    }
+
+    /**
+     * Returns the proof that one trial stands under the seal: its line and audit path.
+     *
+     * @throws Unreadable if the lines do not come to the tree head that the seal lists
+     */
+    public TrialProof proof(Experiment experiment, Cell cell, long trial) throws IOException, BundleFault, Unreadable {
+        long wanted = 0;
+        for (Experiment before : files.study().experiments()) {
+            if (before.id().equals(experiment.id())) {
+                break;
+            }
+            wanted += Lines.of(before);
+        }
+        wanted += Lines.first(experiment, cell.width(), trial)
+                + experiment.strategies().stream().map(s -> s.label()).toList().indexOf(cell.label());
+        MerklePath path = new MerklePath(wanted);
+        byte[] line = new byte[0];
+        for (Experiment each : files.study().experiments()) {
+            String name = Layout.DATA + Layout.trials(each.id());
+            try (LineReader lines = new LineReader(bag.open(name), name, limits.lineBytes())) {
+                Optional<byte[]> next = lines.next();
+                while (next.isPresent()) {
+                    if (path.size() == wanted) {
+                        line = next.get();
+                    }
+                    path.add(MerkleTree.leaf(next.get()));
+                    next = lines.next();
+                }
+            }
+        }
+        try {
+            JsonObject value = (JsonObject) new JsonReader(JsonLimits.LINE).readCanonical(line);
+            TrialProof proof = new TrialProof(
+                    value, wanted, path.path().stream().map(Digests::text).toList(), files.seal());
+            if (!proof.holds()) {
+                throw new Unreadable("the trial lines do not come to the tree head that the seal lists");
+            }
+            return proof;
+        } catch (JsonFault e) {
+            throw new Unreadable("line " + (wanted + 1) + ", " + e.place() + ": " + e.getMessage());
+        }
     }
 
     /** Returns the record of one trial, as written. */

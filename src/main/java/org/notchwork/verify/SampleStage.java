@@ -19,6 +19,7 @@ import org.notchwork.problem.Instance;
 import org.notchwork.seed.Address;
 import org.notchwork.seed.RandomStream;
 import org.notchwork.seed.SeedTree;
+import org.notchwork.study.Cell;
 import org.notchwork.study.Experiment;
 import org.notchwork.study.StrategyChoice;
 import org.notchwork.trial.ControlRecord;
@@ -57,7 +58,8 @@ final class SampleStage {
     /** Runs the sample. An interrupt ends it early, and the report says how far it came. */
     StageReport sample(int wanted, LinePass.Listener listener) throws IOException {
         long all = Lines.of(files.study());
-        NavigableSet<Long> chosen = choose(Math.min(wanted, all), all);
+        long eligible = eligible();
+        NavigableSet<Long> chosen = wanted >= eligible ? everyEligible() : choose(wanted, all);
         long offset = 0;
         try {
             for (Experiment experiment : files.study().experiments()) {
@@ -74,7 +76,7 @@ final class SampleStage {
         } catch (WrittenLines.Stopped e) {
             throw new IOException(e.getMessage(), e);
         }
-        return StageReport.of(Stage.RERUN, findings, good(chosen.size(), all), "recomputed: different");
+        return StageReport.of(Stage.RERUN, findings, good(chosen.size(), eligible), "recomputed: different");
     }
 
     private String good(long sampled, long all) {
@@ -83,13 +85,58 @@ final class SampleStage {
                 + "; referee seed \"" + options.refereeSeed().text() + "\"";
     }
 
+    /** Returns how many trials there are in the cells that the referee allows. */
+    private long eligible() {
+        long eligible = 0;
+        for (Experiment experiment : files.study().experiments()) {
+            long cells = experiment.cells().stream().filter(this::isAllowed).count();
+            eligible += cells * experiment.trials();
+        }
+        return eligible;
+    }
+
+    private boolean isAllowed(Cell cell) {
+        return options.cells().isEmpty() || options.cells().contains(cell.id());
+    }
+
     private NavigableSet<Long> choose(long count, long all) {
         RandomStream stream = new SeedTree(options.refereeSeed()).stream(CHOICE);
         NavigableSet<Long> chosen = new TreeSet<>();
         while (chosen.size() < count) {
-            chosen.add(stream.below(all));
+            long index = stream.below(all);
+            if (options.cells().isEmpty() || isAllowed(cell(index))) {
+                chosen.add(index);
+            }
         }
         return chosen;
+    }
+
+    private NavigableSet<Long> everyEligible() {
+        NavigableSet<Long> chosen = new TreeSet<>();
+        for (long index = 0; index < Lines.of(files.study()); index++) {
+            if (options.cells().isEmpty() || isAllowed(cell(index))) {
+                chosen.add(index);
+            }
+        }
+        return chosen;
+    }
+
+    /** Returns the cell of a line, by its place among all lines. */
+    private Cell cell(long index) {
+        long offset = 0;
+        for (Experiment experiment : files.study().experiments()) {
+            long lines = Lines.of(experiment);
+            if (index < offset + lines) {
+                long within = index - offset;
+                int strategies = experiment.strategies().size();
+                int width = experiment.widths().get((int) (within / strategies / experiment.trials()));
+                String label =
+                        experiment.strategies().get((int) (within % strategies)).label();
+                return new Cell(experiment.id(), width, label);
+            }
+            offset += lines;
+        }
+        throw new IllegalArgumentException("no line " + index);
     }
 
     private void run(Experiment experiment, NavigableSet<Long> chosen, LinePass.Listener listener)

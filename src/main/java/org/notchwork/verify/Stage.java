@@ -27,7 +27,11 @@ public enum Stage {
     /** Trials run again give the same bytes. */
     RERUN(
             "the trials run again are what this program computes from the seed, to the byte",
-            "that the seed was not chosen for its luck");
+            "that the seed was not chosen for its luck"),
+    /** New trials on the referee's seed give compatible figures. */
+    FRESH(
+            "new trials on a seed that the author did not choose give figures that chance alone can explain",
+            "that the figures are exact; a small effect needs many fresh trials to be seen");
 
     private final String proves;
     private final String proofEndsAt;
@@ -39,7 +43,11 @@ public enum Stage {
 
     /** Returns the word on the screen and in JSON. */
     public String word() {
-        return this == RERUN ? "re-run" : name().toLowerCase(Locale.ROOT);
+        return switch (this) {
+            case RERUN -> "re-run";
+            case FRESH -> "fresh run";
+            default -> name().toLowerCase(Locale.ROOT);
+        };
     }
 
     /** Returns what the stage proves if it passes. */

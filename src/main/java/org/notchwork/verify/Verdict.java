@@ -44,12 +44,18 @@ public record Verdict(List<StageReport> stages, Optional<String> seal, long fail
             return "NO: intact, but the bundle itself reports " + failedChecks + " failed cross-checks";
         }
         if (any(StageOutcome.NOT_FINISHED)) {
-            return "NOT FINISHED: what was checked agrees, but the re-run was stopped";
+            return "NOT FINISHED: what was checked agrees, but the re-run or the fresh run was stopped";
         }
-        StageReport rerun = stages.get(stages.size() - 1);
-        return rerun.outcome() == StageOutcome.PASSED
-                ? "YES: intact; figures follow from the lines; re-run " + rerun.sentence()
-                : "YES: intact; figures follow from the lines; no trial was run again (--rerun 50 runs some)";
+        Optional<StageReport> rerun = stage(Stage.RERUN).filter(r -> r.outcome() == StageOutcome.PASSED);
+        Optional<StageReport> fresh = stage(Stage.FRESH).filter(r -> r.outcome() == StageOutcome.PASSED);
+        String same = rerun.map(r -> "re-run " + r.sentence()).orElse("no trial was run again (--rerun 50 runs some)");
+        return "YES: intact; figures follow from the lines; " + same
+                + fresh.map(f -> "; fresh run " + f.sentence()).orElse("");
+    }
+
+    /** Returns the report of a stage. */
+    public Optional<StageReport> stage(Stage stage) {
+        return stages.stream().filter(s -> s.stage() == stage).findFirst();
     }
 
     /** Returns the verdict as JSON. */

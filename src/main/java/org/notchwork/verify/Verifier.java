@@ -5,10 +5,13 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
+import java.util.TreeSet;
 import org.notchwork.bundle.Bag;
 import org.notchwork.bundle.BundleFault;
 import org.notchwork.bundle.Layout;
 import org.notchwork.check.CheckOutcome;
+import org.notchwork.study.Forecast;
 import org.notchwork.study.Study;
 import org.notchwork.trial.TrialRunner;
 
@@ -95,27 +98,95 @@ public final class Verifier {
         reports.add(SealStage.report(files, bag, pass, options.expect()));
         reports.add(pass.certificates().report());
         reports.add(FiguresStage.report(files, pass));
-        reports.add(rerun(files, bag, runner, pass.misplacement().isEmpty(), instances));
+        again(files, bag, runner, pass, instances);
         long failed = files.checks().stream()
                 .filter(c -> c.outcome() == CheckOutcome.DIFFERS)
                 .count();
         return new Verdict(reports, Optional.of(files.seal().digest()), failed, unsealed(files.study()));
     }
 
-    private StageReport rerun(OpenedFiles files, Bag bag, TrialRunner runner, boolean complete, long instances)
+    private void again(OpenedFiles files, Bag bag, TrialRunner runner, LinePass pass, long instances)
             throws IOException {
-        if (!complete) {
-            return StageReport.of(
-                    Stage.RERUN, StageOutcome.NOT_DONE, "the lines are not those that the study calls for");
+        if (pass.misplacement().isPresent()) {
+            String why = "the lines are not those that the study calls for";
+            reports.add(StageReport.of(Stage.RERUN, StageOutcome.NOT_DONE, why));
+            reports.add(StageReport.of(Stage.FRESH, StageOutcome.NOT_DONE, why));
+            return;
         }
-        if (options.rerun() instanceof Rerun.All) {
+        Optional<String> tooLarge = tooLarge(files.study());
+        try (Deadline deadline = new Deadline(options.time())) {
+            reports.add(
+                    tooLarge.isPresent() && !(options.rerun() instanceof Rerun.None)
+                            ? StageReport.of(Stage.RERUN, StageOutcome.NOT_FINISHED, tooLarge.get())
+                            : rerun(files, bag, runner, instances));
+            reports.add(fresh(files, pass, deadline, tooLarge));
+        }
+    }
+
+    /** A study that was run on a larger machine must not take this one down. */
+    private Optional<String> tooLarge(Study study) {
+        long there = Runtime.getRuntime().maxMemory();
+        return Forecast.of(study).stream()
+                .filter(c -> options.cells().isEmpty()
+                        || options.cells().contains(c.cell().id()))
+                .filter(c -> (double) c.memoryBytes() * options.threads() > there)
+                .findFirst()
+                .map(c -> "not finished: 0 trials re-run: " + c.cell().id() + " needs about "
+                        + (c.memoryBytes() >> 20) + " MiB a thread and Java has " + (there >> 20)
+                        + " MiB; use fewer threads, java -Xmx, or --cells");
+    }
+
+    private StageReport rerun(OpenedFiles files, Bag bag, TrialRunner runner, long instances) throws IOException {
+        boolean everywhere = options.cells().isEmpty();
+        if (options.rerun() instanceof Rerun.All && everywhere) {
             return new RerunStage(files, bag, options, runner).all(counting(Stage.RERUN, instances));
         }
-        if (options.rerun() instanceof Rerun.Sample sample) {
-            return new SampleStage(files, bag, options, runner)
-                    .sample(sample.trials(), counting(Stage.RERUN, Math.min(sample.trials(), Lines.of(files.study()))));
+        if (options.rerun() instanceof Rerun.None) {
+            return StageReport.of(Stage.RERUN, StageOutcome.NOT_DONE, "no trial was run again");
         }
-        return StageReport.of(Stage.RERUN, StageOutcome.NOT_DONE, "no trial was run again");
+        Set<String> unknown = new TreeSet<>(options.cells());
+        files.study().cells().forEach(c -> unknown.remove(c.id()));
+        if (!unknown.isEmpty()) {
+            return StageReport.of(
+                    Stage.RERUN,
+                    StageOutcome.NOT_FINISHED,
+                    "not finished: the study has no cell " + String.join(", no cell ", unknown));
+        }
+        long population = population(files.study());
+        int wanted = Integer.MAX_VALUE;
+        if (options.rerun() instanceof Rerun.Sample sample) {
+            wanted = sample.trials();
+        } else if (options.rerun() instanceof Rerun.Until until) {
+            wanted = Rerun.until(population, until.caught(), until.share());
+        }
+        return new SampleStage(files, bag, options, runner)
+                .sample(wanted, counting(Stage.RERUN, Math.min(wanted, population)));
+    }
+
+    private long population(Study study) {
+        return study.experiments().stream()
+                .mapToLong(e -> e.trials()
+                        * e.cells().stream()
+                                .filter(c -> options.cells().isEmpty()
+                                        || options.cells().contains(c.id()))
+                                .count())
+                .sum();
+    }
+
+    private StageReport fresh(OpenedFiles files, LinePass pass, Deadline deadline, Optional<String> tooLarge) {
+        if (options.fresh() == 0) {
+            return StageReport.of(
+                    Stage.FRESH, StageOutcome.NOT_DONE, "no trial on another seed (--fresh 50 runs some)");
+        }
+        if (tooLarge.isPresent() || deadline.hasPassed()) {
+            return StageReport.of(
+                    Stage.FRESH, StageOutcome.NOT_FINISHED, tooLarge.orElse("the time was over before it began"));
+        }
+        long instances = options.fresh()
+                * files.study().experiments().stream()
+                        .mapToLong(e -> e.widths().size())
+                        .sum();
+        return new FreshStage(files, pass, options).run(counting(Stage.FRESH, instances));
     }
 
     /** Returns the payload files that are not under the seal and of which, so, only the digests are compared. */
