@@ -12,6 +12,7 @@ import org.notchwork.bundle.Seal;
 import org.notchwork.json.CanonicalJson;
 import org.notchwork.json.JsonObject;
 import org.notchwork.run.StudyRun;
+import org.notchwork.run.Unfinished;
 import org.notchwork.study.Study;
 
 /** Runs a study and leaves a sealed bundle. */
@@ -45,6 +46,8 @@ final class RunVerb implements Verb {
         return new Options()
                 .addOption(Arguments.valued("output", "FOLDER", "where the bundle goes; the study's name if left out"))
                 .addOption(Arguments.flag("replace", "replace a bundle that is there already"))
+                .addOption(Arguments.flag("resume", "go on with a run that was stopped, to the same seal"))
+                .addOption(Arguments.flag("restart", "forget a run that was stopped and begin again"))
                 .addOption(Arguments.valued("threads", "N", "worker threads; one a processor if left out"))
                 .addOption(Arguments.flag(
                         "anonymous", "for anonymous review: say nothing of machine and time; the seal is the same"))
@@ -67,6 +70,7 @@ final class RunVerb implements Verb {
                     .seal(
                             target,
                             line.hasOption("replace"),
+                            unfinished(line),
                             (experiment, width) -> {
                                 workload.done(experiment, width);
                                 progress.at(workload.share(), experiment.id() + ", width " + width);
@@ -91,6 +95,16 @@ final class RunVerb implements Verb {
             }
         }
         return good ? Exit.GOOD : Exit.NO;
+    }
+
+    private static Unfinished unfinished(CommandLine line) throws Refusal {
+        if (line.hasOption("resume") && line.hasOption("restart")) {
+            throw new Refusal(Exit.USAGE, "--resume and --restart: one of them is wanted");
+        }
+        if (line.hasOption("resume")) {
+            return Unfinished.RESUME;
+        }
+        return line.hasOption("restart") ? Unfinished.DISCARD : Unfinished.REFUSE;
     }
 
     private static JsonObject json(StudyRun.Sealed sealed, Path target) {

@@ -14,7 +14,12 @@ final class Line {
     private final byte[] leafHash;
 
     Line(TrialRecord record, StrategyChoice choice, List<String> functions) {
-        this.bytes = CanonicalJson.bytes(TrialLine.write(record, choice, functions));
+        this(CanonicalJson.bytes(TrialLine.write(record, choice, functions)));
+    }
+
+    /** Takes a line as it was written. */
+    Line(byte[] bytes) {
+        this.bytes = bytes.clone();
         this.leafHash = MerkleTree.leaf(bytes);
     }
 

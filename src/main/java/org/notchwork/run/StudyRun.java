@@ -78,19 +78,33 @@ public final class StudyRun {
      */
     public Sealed seal(Path target, boolean replace, Listener listener, Supplier<Environment> environment)
             throws IOException, InterruptedException {
-        try (BundleWriter writer = BundleWriter.begin(study, target, replace)) {
-            Results results = run(writer, listener);
+        return seal(target, replace, Unfinished.REFUSE, listener, environment);
+    }
+
+    /**
+     * Runs the study, or goes on with it.
+     *
+     * @param unfinished what to do with what an earlier run left beside the target
+     */
+    public Sealed seal(
+            Path target, boolean replace, Unfinished unfinished, Listener listener, Supplier<Environment> environment)
+            throws IOException, InterruptedException {
+        try (BundleWriter writer = BundleWriter.begin(study, target, replace);
+                Journal journal = Journal.open(target, study, unfinished)) {
+            Results results = run(writer, journal, listener);
             Environment where = environment.get();
             String seal = writer.finish(results, where, digest -> Report.pdf(results, digest, where));
+            journal.done();
             return new Sealed(results, seal);
         }
     }
 
-    private Results run(BundleWriter writer, Listener listener) throws IOException, InterruptedException {
+    private Results run(BundleWriter writer, Journal journal, Listener listener)
+            throws IOException, InterruptedException {
         SummaryBuilder figures = new SummaryBuilder(study);
         LineChecks lines = new LineChecks(study);
         Map<String, InstanceTally> examined = new LinkedHashMap<>();
-        new TrialPool(threads).run(TrialRange.of(study), this::notch, (Notch notch) -> {
+        Journal.Sink take = notch -> {
             TrialGroup group = notch.group();
             for (Line line : notch.lines()) {
                 writer.add(group.experiment(), line.bytes(), line.leafHash());
@@ -104,6 +118,11 @@ public final class StudyRun {
             examined.merge(
                     CrossChecker.subject(group.experiment(), group.width()), notch.examined(), InstanceTally::plus);
             listener.done(study.experiment(group.experiment()).orElseThrow(), group.width());
+        };
+        long done = journal.replay(take);
+        new TrialPool(threads).run(TrialRange.after(TrialRange.of(study), done), this::notch, (Notch notch) -> {
+            journal.add(notch);
+            take.take(notch);
         });
         Summary summary = figures.summary();
         return new Results(

@@ -24,6 +24,22 @@ public record TrialRange(Experiment experiment, int width, long from, long to) {
         }
     }
 
+    /** Returns what is left of some ranges after their first trials. */
+    public static List<TrialRange> after(List<TrialRange> ranges, long trials) {
+        List<TrialRange> rest = new ArrayList<>();
+        long skipped = trials;
+        for (TrialRange range : ranges) {
+            long size = range.to() - range.from();
+            if (skipped >= size) {
+                skipped -= size;
+            } else {
+                rest.add(new TrialRange(range.experiment(), range.width(), range.from() + skipped, range.to()));
+                skipped = 0;
+            }
+        }
+        return rest;
+    }
+
     /** Returns all trials of a study in its order, in ranges short enough to be spread over threads. */
     public static List<TrialRange> of(Study study) {
         List<TrialRange> ranges = new ArrayList<>();

@@ -62,7 +62,10 @@ class VerdictTest {
     void theWorstStageDecides(String outcomes, long failedChecks, int exit, String begins) {
         List<StageReport> reports = new ArrayList<>();
         for (Stage stage : Stage.values()) {
-            reports.add(StageReport.of(stage, outcome(outcomes.charAt(reports.size())), "a sentence"));
+            reports.add(StageReport.of(
+                    stage,
+                    outcome(reports.size() < outcomes.length() ? outcomes.charAt(reports.size()) : '-'),
+                    "a sentence"));
         }
         Verdict verdict = new Verdict(reports, Optional.empty(), failedChecks, List.of());
         assertEquals(exit, verdict.exitCode());
