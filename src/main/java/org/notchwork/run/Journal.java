@@ -164,8 +164,22 @@ final class Journal implements AutoCloseable {
         return folder.resolve("piece-" + number);
     }
 
-    /** Written beside, forced, renamed: a piece that has its name is whole. */
-    private void write(Path file, byte[] bytes) throws IOException {
+    /**
+     * Written beside, forced, renamed: a piece that has its name is whole. An interrupt, which is what often ends a run,
+     * would close the channel under the writer's hands; it waits until the piece is written.
+     */
+    private static void write(Path file, byte[] bytes) throws IOException {
+        boolean isInterrupted = Thread.interrupted();
+        try {
+            writeUndisturbed(file, bytes);
+        } finally {
+            if (isInterrupted) {
+                Thread.currentThread().interrupt();
+            }
+        }
+    }
+
+    private static void writeUndisturbed(Path file, byte[] bytes) throws IOException {
         Path partial = file.resolveSibling(file.getFileName() + ".partial");
         try (FileChannel channel = FileChannel.open(
                 partial, StandardOpenOption.CREATE, StandardOpenOption.TRUNCATE_EXISTING, StandardOpenOption.WRITE)) {

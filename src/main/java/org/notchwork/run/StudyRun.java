@@ -1,6 +1,7 @@
 package org.notchwork.run;
 
 import java.io.IOException;
+import java.nio.channels.ClosedByInterruptException;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
@@ -96,6 +97,12 @@ public final class StudyRun {
             String seal = writer.finish(results, where, digest -> Report.pdf(results, digest, where));
             journal.done();
             return new Sealed(results, seal);
+        } catch (ClosedByInterruptException e) {
+            // As for any interrupt that is answered, the thread's mark is taken off.
+            Thread.interrupted();
+            InterruptedException stopped = new InterruptedException("interrupted while a file was written");
+            stopped.initCause(e);
+            throw stopped;
         }
     }
 
