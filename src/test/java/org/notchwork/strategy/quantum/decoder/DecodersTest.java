@@ -74,8 +74,7 @@ class DecodersTest {
         List<JsonNode> rows = new ArrayList<>();
         for (JsonNode row : CheckValues.section("K").required("mc")) {
             boolean small = row.required("n").asInt() == 8 && row.required("m").asInt() <= 65;
-            if (small
-                    && Set.of("0.02", "0.05").contains(row.required("p").asString())) {
+            if (small && Set.of("0.02", "0.05").contains(row.required("p").asString())) {
                 rows.add(row);
             }
         }
