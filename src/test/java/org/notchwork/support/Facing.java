@@ -57,7 +57,19 @@ public record Facing(Instance instance, Attempt attempt, List<Counts> byFunction
             Instance instance,
             Promise promise,
             RandomStream stream) {
-        Meter meter = new Meter(NO_LIMIT, instance.counters());
+        return quantum(strategy, engine, noise, instance, promise, NO_LIMIT, stream);
+    }
+
+    /** Lets a quantum strategy face an instance. */
+    public static Facing quantum(
+            QuantumStrategy strategy,
+            Engine engine,
+            Noise noise,
+            Instance instance,
+            Promise promise,
+            long limit,
+            RandomStream stream) {
+        Meter meter = new Meter(limit, instance.counters());
         Unitary unitary = new Unitary(instance.function(), meter);
         Simulation clean = engine instanceof SightedEngine sighted
                 ? sighted.open(unitary, instance.hidden())
