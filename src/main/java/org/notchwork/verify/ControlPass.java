@@ -72,7 +72,7 @@ final class ControlPass {
 
     private Optional<Misplacement> read(Experiment experiment, LineReader lines, String path)
             throws IOException, BundleFault, OpenedFiles.Malformed, InterruptedException {
-        Optional<Misplacement> misplacement = Optional.empty();
+        long called = Lines.ofControls(study, experiment);
         for (int width : experiment.widths()) {
             for (long trial = 0; trial < experiment.trials(); trial++) {
                 if (Thread.interrupted()) {
@@ -88,32 +88,39 @@ final class ControlPass {
                                 "",
                                 "the end of the file",
                                 "control of " + place.text()));
-                        return Optional.of(new Misplacement(path, lines.number() + 1, Optional.of(place)));
+                        return Optional.of(new Misplacement(path, lines.number() + 1, Optional.of(place))
+                                .in(lines.number(), called));
                     }
                     ControlRecord record = parsed(line.get(), experiment, path, lines.number());
                     if (!isAt(record, place)) {
                         String found = "control of trial " + record.trial() + " of "
                                 + record.cell().label() + " at width "
                                 + record.cell().width();
-                        misplaced.add(new Finding(
-                                path, OptionalLong.of(lines.number()), "", found, "control of " + place.text()));
-                        misplacement = Optional.of(new Misplacement(
-                                path, lines.number(), Optional.of(place), OptionalLong.empty(), false, 0, 0));
+                        long here = lines.number();
+                        misplaced.add(
+                                new Finding(path, OptionalLong.of(here), "", found, "control of " + place.text()));
                         drain(lines);
-                        return misplacement;
+                        return Optional.of(new Misplacement(
+                                path,
+                                here,
+                                Optional.of(place),
+                                Lines.line(study, experiment, record),
+                                false,
+                                lines.number(),
+                                called));
                     }
                     certificates.check(experiment, record, path, lines.number());
                     figures.addControl(record);
                 }
             }
         }
-        if (lines.next().isPresent()) {
-            misplaced.add(
-                    new Finding(path, OptionalLong.of(lines.number()), "", "one more line", "the end of the file"));
-            misplacement = Optional.of(new Misplacement(path, lines.number(), Optional.empty()));
-            drain(lines);
+        if (lines.next().isEmpty()) {
+            return Optional.empty();
         }
-        return misplacement;
+        long extra = lines.number();
+        misplaced.add(new Finding(path, OptionalLong.of(extra), "", "one more line", "the end of the file"));
+        drain(lines);
+        return Optional.of(new Misplacement(path, extra, Optional.empty()).in(lines.number(), called));
     }
 
     /** Reads on to the end, so that the digest is that of the whole file. */

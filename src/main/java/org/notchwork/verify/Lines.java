@@ -1,9 +1,11 @@
 package org.notchwork.verify;
 
+import java.util.List;
 import java.util.OptionalLong;
 import org.notchwork.study.Experiment;
 import org.notchwork.study.StrategyChoice;
 import org.notchwork.study.Study;
+import org.notchwork.trial.ControlRecord;
 import org.notchwork.trial.TrialRecord;
 
 /** Where the lines of trials stand: by width, then trial, then strategy. */
@@ -55,6 +57,30 @@ final class Lines {
         return called
                 ? OptionalLong.of(first(experiment, record.cell().width(), record.trial()) + strategy + 1)
                 : OptionalLong.empty();
+    }
+
+    /** Returns how many lines of controls an experiment calls for. */
+    static long ofControls(Study study, Experiment experiment) {
+        return experiment.widths().stream()
+                .mapToLong(w -> (long) experiment.trials()
+                        * study.controls(experiment, w).size())
+                .sum();
+    }
+
+    /** Returns the line, from 1, where a control belongs; empty if the experiment does not call for it. */
+    static OptionalLong line(Study study, Experiment experiment, ControlRecord record) {
+        long before = 0;
+        for (int width : experiment.widths()) {
+            List<String> labels = study.controls(experiment, width).stream()
+                    .map(StrategyChoice::label)
+                    .toList();
+            int strategy = labels.indexOf(record.cell().label());
+            if (width == record.cell().width() && strategy >= 0 && calls(experiment, width, record.trial())) {
+                return OptionalLong.of(before + record.trial() * labels.size() + strategy + 1);
+            }
+            before += (long) experiment.trials() * labels.size();
+        }
+        return OptionalLong.empty();
     }
 
     /** Returns whether an experiment calls for a trial of a width. */

@@ -10,6 +10,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.function.UnaryOperator;
 import org.notchwork.bundle.ClaimsFile;
+import org.notchwork.bundle.ControlLine;
 import org.notchwork.bundle.CrossChecksFile;
 import org.notchwork.bundle.Layout;
 import org.notchwork.bundle.SummaryFile;
@@ -42,14 +43,28 @@ final class Forger {
     /** Changes one line's record, from 1, and makes everything that follows from the lines anew. */
     static void forge(Path bundle, Study study, String experiment, int line, UnaryOperator<TrialRecord> change)
             throws IOException, JsonFault {
-        SummaryBuilder figures = new SummaryBuilder(study);
-        LineChecks lines = new LineChecks(study);
         for (Experiment e : study.experiments()) {
-            List<TrialRecord> records = records(bundle, e);
             if (e.id().equals(experiment)) {
+                List<TrialRecord> records = records(bundle, e);
                 records.set(line - 1, change.apply(records.get(line - 1)));
                 write(bundle, e, records);
             }
+        }
+        derive(bundle, study);
+    }
+
+    /** Makes everything that follows from the lines of trials and controls anew. */
+    static void derive(Path bundle, Study study) throws IOException, JsonFault {
+        LineChecks lines = new LineChecks(study);
+        Summary summary = summary(bundle, study, lines);
+        derived(bundle, study, summary, lines);
+        BundleFixture.reseal(bundle, study);
+    }
+
+    private static Summary summary(Path bundle, Study study, LineChecks lines) throws IOException, JsonFault {
+        SummaryBuilder figures = new SummaryBuilder(study);
+        for (Experiment e : study.experiments()) {
+            List<TrialRecord> records = records(bundle, e);
             int strategies = e.strategies().size();
             for (int i = 0; i < records.size(); i += strategies) {
                 TrialRecord first = records.get(i);
@@ -58,9 +73,14 @@ final class Forger {
                 figures.add(group);
                 lines.add(group);
             }
+            if (study.hasControls(e)) {
+                for (String line : Files.readAllLines(file(bundle, Layout.controls(e.id())), StandardCharsets.UTF_8)) {
+                    figures.addControl(ControlLine.read(object(line), e.id(), new ArrayList<>())
+                            .orElseThrow());
+                }
+            }
         }
-        derived(bundle, study, figures.summary(), lines);
-        BundleFixture.reseal(bundle, study);
+        return figures.summary();
     }
 
     private static void derived(Path bundle, Study study, Summary summary, LineChecks lines)
@@ -84,17 +104,8 @@ final class Forger {
         if (checks.equals(before)) {
             throw new IllegalStateException("no check was changed");
         }
-        SummaryBuilder figures = new SummaryBuilder(study);
-        for (Experiment e : study.experiments()) {
-            List<TrialRecord> records = records(bundle, e);
-            int strategies = e.strategies().size();
-            for (int i = 0; i < records.size(); i += strategies) {
-                TrialRecord first = records.get(i);
-                figures.add(new TrialGroup(
-                        e.id(), first.cell().width(), first.trial(), records.subList(i, i + strategies)));
-            }
-        }
-        Files.write(file(bundle, Layout.SUMMARY), CanonicalJson.bytes(SummaryFile.write(figures.summary(), checks)));
+        Summary summary = summary(bundle, study, new LineChecks(study));
+        Files.write(file(bundle, Layout.SUMMARY), CanonicalJson.bytes(SummaryFile.write(summary, checks)));
         Files.write(file(bundle, Layout.CROSS_CHECKS), CanonicalJson.bytes(CrossChecksFile.write(checks)));
         BundleFixture.reseal(bundle, study);
     }

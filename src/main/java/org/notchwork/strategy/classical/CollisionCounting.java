@@ -78,7 +78,14 @@ public final class CollisionCounting implements ClassicalStrategy {
             }
             long value = oracle.query(x);
             long earlier = seen.noteOrFind(value, x);
-            if (earlier != SeenValues.NONE && holds(oracle, earlier ^ x, stream)) {
+            if (earlier == SeenValues.NONE) {
+                continue;
+            }
+            Optional<Boolean> holds = holds(oracle, earlier ^ x, stream);
+            if (holds.isEmpty()) {
+                return new Attempt.Censored(new Usage(0, seen.memoryWords()));
+            }
+            if (holds.get()) {
                 Word shared = Word.of(oracle.valueWidth(), value);
                 Pair pair = new Pair(Word.of(width, earlier), Word.of(width, x), shared, shared);
                 return new Attempt.Answered(
@@ -94,17 +101,17 @@ public final class CollisionCounting implements ClassicalStrategy {
                 : new Attempt.Unanswered(usage);
     }
 
-    /** Two random points and their partners: four queries, fewer if the first pair differs or the limit is near. */
-    private static boolean holds(Oracle oracle, long candidate, RandomStream stream) {
+    /** Two random points and their partners: four queries, fewer if the first pair differs; empty if the limit is nearer. */
+    private static Optional<Boolean> holds(Oracle oracle, long candidate, RandomStream stream) {
         for (int test = 0; test < TESTS; test++) {
             if (oracle.remaining() < 2) {
-                return false;
+                return Optional.empty();
             }
             long r = stream.bits(oracle.width());
             if (oracle.query(r) != oracle.query(r ^ candidate)) {
-                return false;
+                return Optional.of(false);
             }
         }
-        return true;
+        return Optional.of(true);
     }
 }
