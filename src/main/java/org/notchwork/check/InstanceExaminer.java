@@ -91,7 +91,8 @@ public final class InstanceExaminer {
     }
 
     private static boolean mayErr(Problem problem, StrategyChoice choice) {
-        return choice.successLaw(problem).isPresent()
+        return choice.strategy().mayErr()
+                || choice.successLaw(problem).isPresent()
                 || !choice.noise().isNone()
                 || !problem.promise().isExact();
     }

@@ -24,6 +24,14 @@ public sealed interface Strategy permits ClassicalStrategy, QuantumStrategy {
     /** Returns whether the query count depends on the hidden answer alone, not on chance or labels. */
     boolean deterministic();
 
+    /**
+     * Returns whether the strategy may name a wrong answer by design, although the promise holds and nothing is disturbed:
+     * then it is held to its rate of success, not to being right every time.
+     */
+    default boolean mayErr() {
+        return false;
+    }
+
     /** Returns about how many bytes an attempt at a width takes at most, within a query limit. */
     long memoryBytes(int width, long queryLimit);
 }

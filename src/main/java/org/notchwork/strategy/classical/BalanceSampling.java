@@ -53,6 +53,11 @@ public record BalanceSampling(int queries) implements ClassicalStrategy {
     }
 
     @Override
+    public boolean mayErr() {
+        return true;
+    }
+
+    @Override
     public long memoryBytes(int width, long queryLimit) {
         return SeenValues.bytes(queries);
     }

@@ -51,6 +51,11 @@ public final class CollisionCounting implements ClassicalStrategy {
     }
 
     @Override
+    public boolean mayErr() {
+        return true;
+    }
+
+    @Override
     public long memoryBytes(int width, long queryLimit) {
         return 2 * SeenValues.bytes(Math.min(queryLimit, 1L << width));
     }

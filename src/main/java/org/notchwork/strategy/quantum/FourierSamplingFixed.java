@@ -82,6 +82,11 @@ public record FourierSamplingFixed(Rounds rounds, Decoder decoder) implements Qu
     }
 
     @Override
+    public boolean mayErr() {
+        return true;
+    }
+
+    @Override
     public long memoryBytes(int width, long queryLimit) {
         return 16L * rounds.at(width) + decoder.memoryBytes(width);
     }
