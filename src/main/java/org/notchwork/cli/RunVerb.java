@@ -66,7 +66,7 @@ final class RunVerb implements Verb {
         Instant start = Instant.now();
         StudyRun.Sealed sealed;
         try {
-            sealed = new StudyRun(study, threads)
+            sealed = new StudyRun(study, threads, System::nanoTime)
                     .seal(
                             target,
                             line.hasOption("replace"),

@@ -15,6 +15,7 @@ import java.util.Arrays;
 import java.util.Iterator;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.LongSupplier;
 import java.util.stream.LongStream;
 import java.util.stream.Stream;
 import org.notchwork.bundle.Digests;
@@ -40,25 +41,29 @@ final class Journal implements AutoCloseable {
     private final Path folder;
     private final Study study;
     private JournalPiece open = new JournalPiece();
-    private long openSince = System.nanoTime();
+    private final LongSupplier clock;
+    private long openSince;
     private int pieces;
     private boolean isDone;
 
-    private Journal(Path folder, Study study) {
+    private Journal(Path folder, Study study, LongSupplier clock) {
         this.folder = folder;
         this.study = study;
+        this.clock = clock;
+        this.openSince = clock.getAsLong();
     }
 
     /**
      * Opens the journal of a bundle.
      *
      * @param target where the bundle will be
+     * @param clock nanoseconds, for how old a piece is; nothing under the seal depends on it
      * @param left what to do with what an earlier run left
      * @throws IOException if there is one that must not be touched, or the disk fails
      */
-    static Journal open(Path target, Study study, Unfinished left) throws IOException {
+    static Journal open(Path target, Study study, Unfinished left, LongSupplier clock) throws IOException {
         Path place = target.toAbsolutePath().normalize();
-        Journal journal = new Journal(place.resolveSibling("." + place.getFileName() + ".journal"), study);
+        Journal journal = new Journal(place.resolveSibling("." + place.getFileName() + ".journal"), study, clock);
         boolean exists = Files.isDirectory(journal.folder, LinkOption.NOFOLLOW_LINKS);
         if (exists && left == Unfinished.REFUSE) {
             throw new IOException(target
@@ -142,7 +147,7 @@ final class Journal implements AutoCloseable {
     /** Notes a finished instance. */
     void add(Notch notch) throws IOException {
         open.add(notch);
-        if (open.size() >= PIECE_BYTES || System.nanoTime() - openSince >= PIECE_NANOS) {
+        if (open.size() >= PIECE_BYTES || clock.getAsLong() - openSince >= PIECE_NANOS) {
             flush();
         }
     }
@@ -157,7 +162,7 @@ final class Journal implements AutoCloseable {
             pieces++;
         }
         open = new JournalPiece();
-        openSince = System.nanoTime();
+        openSince = clock.getAsLong();
     }
 
     private Path piece(int number) {

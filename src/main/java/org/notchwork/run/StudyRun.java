@@ -7,6 +7,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.function.LongSupplier;
 import java.util.function.Supplier;
 import org.notchwork.bundle.BundleWriter;
 import org.notchwork.bundle.ControlLine;
@@ -36,6 +37,7 @@ public final class StudyRun {
 
     private final Study study;
     private final int threads;
+    private final LongSupplier clock;
     private final TrialRunner runner;
     private final InstanceExaminer examiner = new InstanceExaminer(Engines.reference());
 
@@ -46,6 +48,16 @@ public final class StudyRun {
      * @param threads how many worker threads; the results do not depend on it
      */
     public StudyRun(Study study, int threads) {
+        this(study, threads, () -> 0);
+    }
+
+    /**
+     * Creates a run that writes its journal by a clock.
+     *
+     * @param clock nanoseconds, for how old a piece of the journal is; the results do not depend on it
+     */
+    public StudyRun(Study study, int threads, LongSupplier clock) {
+        this.clock = clock;
         this.study = study;
         this.threads = threads;
         this.runner = new TrialRunner(study);
@@ -91,7 +103,7 @@ public final class StudyRun {
             Path target, boolean replace, Unfinished unfinished, Listener listener, Supplier<Environment> environment)
             throws IOException, InterruptedException {
         try (BundleWriter writer = BundleWriter.begin(study, target, replace);
-                Journal journal = Journal.open(target, study, unfinished)) {
+                Journal journal = Journal.open(target, study, unfinished, clock)) {
             Results results = run(writer, journal, listener);
             Environment where = environment.get();
             String seal = writer.finish(results, where, digest -> Report.pdf(results, digest, where));

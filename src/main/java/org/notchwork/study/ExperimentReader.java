@@ -15,7 +15,7 @@ import org.notchwork.problem.Problem;
 final class ExperimentReader {
 
     private static final int MOST_WIDTHS = 40;
-    private static final int MOST_STRATEGIES = 12;
+    private static final int MOST_STRATEGIES = 20;
     private static final int MOST_TRIALS = 1_000_000;
     private static final int ANY_WIDTH = 4096;
 

@@ -7,6 +7,8 @@ import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import org.notchwork.bits.Word;
 import org.notchwork.catalogue.Engines;
 import org.notchwork.engine.BlindEngine;
@@ -21,11 +23,13 @@ import org.notchwork.problem.Problem;
 import org.notchwork.problem.Unitary;
 import org.notchwork.seed.RandomStream;
 import org.notchwork.study.Experiment;
+import org.notchwork.study.Study;
 import org.notchwork.support.Given;
 import org.notchwork.support.Studies;
 import org.notchwork.trial.Outcome;
 import org.notchwork.trial.TrialGroup;
 import org.notchwork.trial.TrialRecord;
+import org.notchwork.trial.TrialRunner;
 
 class InstanceExaminerTest {
 
@@ -154,5 +158,53 @@ class InstanceExaminerTest {
                 Studies.runner().run(classical, WIDTH, 0));
         assertEquals(CheckOutcome.NOT_COMPARABLE, tally.engines().outcome());
         assertEquals(CheckOutcome.AGREES, tally.answers().outcome());
+    }
+
+    /**
+     * Strategies that err by design are held to their outcome: an honest wrong answer agrees, one that is called right does
+     * not.
+     */
+    @ParameterizedTest
+    @CsvSource(delimiter = '|', quoteCharacter = '~', textBlock = """
+            "kind": "constant-or-balanced"                     | "name": "balance-sampling", "queries": 2
+            "kind": "xor-period-or-none", "instances": "table" | "name": "fourier-sampling-fixed", "engine": "fibre", "rounds": 4
+            "kind": "xor-period", "instances": "table" | "name": "fourier-sampling-fixed", "engine": "fibre", "rounds": 4, "decoder": "likelihood"
+            """)
+    void anHonestErrorAgreesAndOneCalledRightDiffers(String problem, String strategy) {
+        Study study = org.notchwork.Studies.of("""
+                { "format": "notchwork-study/2", "title": "Errors", "question": "Who errs?",
+                  "seed": "a seed of the study of errors", "cross-check-width": 4,
+                  "experiments": [ { "id": "e", "problem": { %s }, "widths": [4], "strategies": [ { %s } ],
+                    "trials": 60, "query-limit": 100 } ], "claims": [] }
+                """.formatted(problem.strip(), strategy.strip()));
+        Experiment erring = study.experiments().get(0);
+        TrialRunner runner = new TrialRunner(study);
+        int errors = 0;
+        for (long trial = 0; trial < erring.trials(); trial++) {
+            Instance drawn = runner.instance(erring, WIDTH, trial);
+            TrialGroup honest = runner.run(erring, WIDTH, trial);
+            assertEquals(
+                    CheckOutcome.AGREES,
+                    examiner.examine(erring, drawn, honest).answers().outcome());
+            TrialRecord record = honest.records().get(0);
+            if (record.outcome() == Outcome.WRONG) {
+                errors++;
+                TrialRecord called = new TrialRecord(
+                        record.cell(),
+                        record.trial(),
+                        record.hidden(),
+                        Outcome.SOLVED,
+                        record.answer(),
+                        record.certificate(),
+                        record.counts(),
+                        record.usage());
+                assertEquals(
+                        CheckOutcome.DIFFERS,
+                        examiner.examine(erring, drawn, new TrialGroup("e", WIDTH, trial, List.of(called)))
+                                .answers()
+                                .outcome());
+            }
+        }
+        assertTrue(errors > 0, "nothing went wrong");
     }
 }

@@ -165,8 +165,8 @@ class StudyLimitsTest {
                 List.of("/experiments/0/widths: a list of 41; 1 to 40 items are wanted"),
                 lines(only(experiment("e", 2, 42, "sequential-scan"))));
         assertEquals(
-                "/experiments/0/strategies: a list of 13; 1 to 12 items are wanted",
-                lines(only(experiment("e", 2, 3, "sequential-scan", 13))).get(0));
+                "/experiments/0/strategies: a list of 21; 1 to 20 items are wanted",
+                lines(only(experiment("e", 2, 3, "sequential-scan", 21))).get(0));
         String sixteen = joined(16, i -> experiment("e" + i, 2, 3, "random-draws"));
         assertEquals(16, Studies.of(only(sixteen)).experiments().size());
         assertEquals(

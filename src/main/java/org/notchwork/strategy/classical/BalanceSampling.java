@@ -48,13 +48,13 @@ public record BalanceSampling(int queries) implements ClassicalStrategy {
     }
 
     @Override
-    public boolean mayErr() {
-        return true;
+    public boolean deterministic() {
+        return false;
     }
 
     @Override
-    public boolean deterministic() {
-        return false;
+    public boolean mayErr() {
+        return true;
     }
 
     @Override

@@ -46,13 +46,13 @@ public final class CollisionCounting implements ClassicalStrategy {
     }
 
     @Override
-    public boolean mayErr() {
-        return true;
+    public boolean deterministic() {
+        return false;
     }
 
     @Override
-    public boolean deterministic() {
-        return false;
+    public boolean mayErr() {
+        return true;
     }
 
     @Override

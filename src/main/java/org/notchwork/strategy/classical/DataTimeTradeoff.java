@@ -75,6 +75,11 @@ public record DataTimeTradeoff(Optional<Integer> dataBits) implements ClassicalS
     }
 
     @Override
+    public boolean mayErr() {
+        return true;
+    }
+
+    @Override
     public long memoryBytes(int width, long queryLimit) {
         return 4 * SeenValues.bytes(1L << Math.min(MOST_DATA_BITS, dataBits.orElse(width / 2)));
     }

@@ -83,13 +83,13 @@ public record FourierSamplingFixed(Rounds rounds, Decoder decoder) implements Qu
     }
 
     @Override
-    public boolean mayErr() {
-        return true;
+    public boolean deterministic() {
+        return false;
     }
 
     @Override
-    public boolean deterministic() {
-        return false;
+    public boolean mayErr() {
+        return true;
     }
 
     @Override
